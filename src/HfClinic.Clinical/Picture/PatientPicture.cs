@@ -1,0 +1,54 @@
+using System.Collections.Immutable;
+using HfClinic.Clinical.Values;
+
+namespace HfClinic.Clinical.Picture;
+
+/// <summary>
+/// Everything a rule may see of one patient, as of the end of one clinic day. Immutable; later data are not in it.
+/// </summary>
+public sealed record PatientPicture
+{
+    /// <summary>The clinic day the picture stands for, in the clinic's time zone.</summary>
+    public required DateOnly AsOf { get; init; }
+
+    public required DateOnly EnrolledOn { get; init; }
+
+    public DateOnly? BirthDate { get; init; }
+
+    public Sex Sex { get; init; }
+
+    public int? HeightCentimetres { get; init; }
+
+    /// <summary>Whether daily weights from home are expected.</summary>
+    public bool WeighsAtHome { get; init; }
+
+    /// <summary>The last discharge from hospital for heart failure, if any.</summary>
+    public DateOnly? DischargedFromHospitalOn { get; init; }
+
+    /// <summary>Weights in order of time: accepted and held. Struck-out and superseded ones are left out.</summary>
+    public ImmutableArray<WeightReading> Weights { get; init; } = [];
+
+    /// <summary>Blood pressure, heart rate and oxygen saturation, accepted, in order of time.</summary>
+    public ImmutableArray<VitalReading> Vitals { get; init; } = [];
+
+    /// <summary>Symptom reports in order of day.</summary>
+    public ImmutableArray<SymptomReport> Symptoms { get; init; } = [];
+
+    /// <summary>Target weights in order of day; the last one on or before <see cref="AsOf"/> holds.</summary>
+    public ImmutableArray<TargetWeight> TargetWeights { get; init; } = [];
+
+    /// <summary>Dose courses in order of start.</summary>
+    public ImmutableArray<DoseCourse> DoseCourses { get; init; } = [];
+
+    /// <summary>Blood tests in order of time.</summary>
+    public ImmutableArray<BloodResult> BloodTests { get; init; } = [];
+
+    /// <summary>Ejection fractions in order of day.</summary>
+    public ImmutableArray<EjectionFraction> EjectionFractions { get; init; } = [];
+
+    /// <summary>Rule identifiers of the flags open for this patient before this assessment.</summary>
+    public ImmutableHashSet<string> OpenFlagRules { get; init; } = [];
+
+    /// <summary>The target weight that holds on <see cref="AsOf"/>, or null when none was set.</summary>
+    public TargetWeight? TargetWeight => TargetWeights.LastOrDefault(target => target.From <= AsOf);
+}

@@ -1,0 +1,7 @@
+namespace HfClinic.Browser.Tests;
+
+public class SolutionTests
+{
+    [Fact]
+    public void Runs() => Assert.NotNull(typeof(SolutionTests).Assembly);
+}

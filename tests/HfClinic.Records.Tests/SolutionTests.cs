@@ -1,0 +1,7 @@
+namespace HfClinic.Records.Tests;
+
+public class SolutionTests
+{
+    [Fact]
+    public void Runs() => Assert.NotNull(typeof(SolutionTests).Assembly);
+}
