@@ -30,6 +30,9 @@ public sealed class Flag
 
     public string Limit { get; set; } = "";
 
+    /// <summary>What a person should keep in mind beside this flag; empty for most.</summary>
+    public string Caution { get; set; } = "";
+
     /// <summary>The evidence of the latest step, as JSON.</summary>
     public string EvidenceJson { get; set; } = "[]";
 
@@ -66,6 +69,9 @@ public sealed class Flag
 
     public string? AnsweredByName { get; set; }
 
+    /// <summary>The last day the answer stands, where a person set one.</summary>
+    public DateOnly? AnswerStandsUntil { get; set; }
+
     public string? Answer { get; set; }
 
     public DateTime? ClearedAt { get; set; }
@@ -87,6 +93,7 @@ internal sealed class FlagMapping : IEntityTypeConfiguration<Flag>
         flag.Property(f => f.Subject).HasMaxLength(80);
         flag.Property(f => f.Statement).HasMaxLength(400);
         flag.Property(f => f.Limit).HasMaxLength(400);
+        flag.Property(f => f.Caution).HasMaxLength(400);
         flag.Property(f => f.SourceKeys).HasMaxLength(200);
         flag.Property(f => f.Magnitude).HasPrecision(14, 4);
         flag.Property(f => f.SeenByName).HasMaxLength(100);

@@ -20,6 +20,9 @@ public enum FlagStepKind
     Woken = 7,
     Answered = 8,
     Cleared = 9,
+
+    /// <summary>Answered or cleared, and now open again.</summary>
+    Reopened = 10,
 }
 
 /// <summary>One step of a flag, as it was shown then. Added, never changed.</summary>
@@ -47,6 +50,8 @@ public sealed class FlagStep
 
     public string Limit { get; set; } = "";
 
+    public string Caution { get; set; } = "";
+
     public string EvidenceJson { get; set; } = "[]";
 
     public int RuleVersion { get; set; }
@@ -67,6 +72,7 @@ internal sealed class FlagStepMapping : IEntityTypeConfiguration<FlagStep>
         step.Property(s => s.ByName).HasMaxLength(100);
         step.Property(s => s.Statement).HasMaxLength(400);
         step.Property(s => s.Limit).HasMaxLength(400);
+        step.Property(s => s.Caution).HasMaxLength(400);
         step.Property(s => s.Note).HasMaxLength(2000);
     }
 }

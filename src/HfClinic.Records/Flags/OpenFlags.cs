@@ -32,6 +32,7 @@ internal static class OpenFlags
         Urgency = flag.Urgency,
         Statement = flag.Statement,
         Limit = flag.Limit,
+        Caution = flag.Caution,
         EvidenceJson = flag.EvidenceJson,
         RuleVersion = flag.RuleVersion,
         ProtocolVersion = flag.ProtocolVersion,

@@ -45,6 +45,12 @@ public sealed class PatientSummary
     /// <summary>Rule identifiers of the open flags that are not put off, separated by spaces.</summary>
     public string OpenRules { get; set; } = "";
 
+    /// <summary>What could not be told, and why, separated by "; ". Never shown as "fine".</summary>
+    public string NotChecked { get; set; } = "";
+
+    /// <summary>A rule failed for this patient: the row says so.</summary>
+    public bool CheckFailed { get; set; }
+
     public int OpenFlags { get; set; }
 
     public int PutOffFlags { get; set; }
@@ -77,6 +83,7 @@ internal sealed class PatientSummaryMapping : IEntityTypeConfiguration<PatientSu
         summary.HasOne<Patient>().WithOne().HasForeignKey<PatientSummary>(s => s.PatientId).OnDelete(DeleteBehavior.Restrict);
         summary.HasIndex(s => new { s.OnDailyWeights, s.WorstUrgency, s.WorstSince });
         summary.Property(s => s.OpenRules).HasMaxLength(1000);
+        summary.Property(s => s.NotChecked).HasMaxLength(2000);
         summary.Property(s => s.Why).HasMaxLength(2000);
         summary.Property(s => s.LoopDiuretic).HasMaxLength(200);
         summary.Property(s => s.LastContact).HasMaxLength(200);
