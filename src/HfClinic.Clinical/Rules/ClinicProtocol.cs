@@ -1,64 +1,7 @@
 using System.Collections.Immutable;
+using HfClinic.Clinical.Values;
 
 namespace HfClinic.Clinical.Rules;
-
-/// <summary>Which side of a limit counts.</summary>
-public enum Comparison
-{
-    Above,
-    AtLeast,
-    Below,
-    AtMost,
-}
-
-/// <summary>One threshold of the clinic.</summary>
-/// <param name="Key">Stable key: "weight.gain-3-days".</param>
-/// <param name="Title">Its name on screen.</param>
-/// <param name="Value">In <paramref name="Unit"/>.</param>
-/// <param name="Unit">g, %, days, mmHg …</param>
-/// <param name="Comparison">How a measured value is compared with it.</param>
-/// <param name="IsOn">Whether the clinic uses it.</param>
-/// <param name="Lowest">Lower end of the range a clinic may set.</param>
-/// <param name="Highest">Upper end of the range a clinic may set.</param>
-/// <param name="SourceKeys">Keys into the source table.</param>
-/// <param name="Standing">How well the figure is confirmed.</param>
-public sealed record Threshold(
-    string Key,
-    string Title,
-    decimal Value,
-    string Unit,
-    Comparison Comparison,
-    bool IsOn,
-    decimal Lowest,
-    decimal Highest,
-    ImmutableArray<string> SourceKeys,
-    Standing Standing)
-{
-    /// <summary>Whether the measured value, in the same unit, meets the threshold. False when it is switched off.</summary>
-    public bool IsMetBy(decimal measured) => IsOn && Comparison switch
-    {
-        Comparison.Above => measured > Value,
-        Comparison.AtLeast => measured >= Value,
-        Comparison.Below => measured < Value,
-        _ => measured <= Value,
-    };
-}
-
-/// <summary>How well a figure is confirmed.</summary>
-public enum Standing
-{
-    /// <summary>Read in the source's own text.</summary>
-    Confirmed,
-
-    /// <summary>Seen quoted in another publication.</summary>
-    SecondHand,
-
-    /// <summary>From memory: a clinician must sign it off.</summary>
-    Unconfirmed,
-
-    /// <summary>An engineering or clinic default, to be signed off by the clinic.</summary>
-    ClinicDefault,
-}
 
 /// <summary>The clinic's thresholds as of one version.</summary>
 public sealed record ClinicProtocol
@@ -71,9 +14,40 @@ public sealed record ClinicProtocol
 
     public required ImmutableDictionary<string, Threshold> Thresholds { get; init; }
 
+    /// <summary>The unit in which statements name weights.</summary>
+    public WeightUnit WeightUnit { get; init; } = WeightUnit.Kilograms;
+
     /// <summary>The threshold of the given key.</summary>
     /// <exception cref="KeyNotFoundException">No such threshold: a fault in the program, not in the data.</exception>
     public Threshold this[string key] => Thresholds.TryGetValue(key, out var threshold)
         ? threshold
         : throw new KeyNotFoundException($"The protocol has no threshold '{key}'.");
+
+    /// <summary>Why the change may not be made, in words for the person who asked for it; null when it may.</summary>
+    public string? WhyRefused(ThresholdOverride change) => !Thresholds.TryGetValue(change.Key, out var threshold)
+        ? $"There is no threshold '{change.Key}'"
+        : change.Value is { } value ? threshold.WhyRefused(value) : null;
+
+    /// <summary>The protocol with the changes made, under the same version number. Later changes win over earlier ones.</summary>
+    /// <exception cref="ArgumentException">A change is refused; see <see cref="WhyRefused"/>. None is made.</exception>
+    public ClinicProtocol With(IEnumerable<ThresholdOverride> changes)
+    {
+        var thresholds = Thresholds.ToBuilder();
+        foreach (var change in changes)
+        {
+            if (WhyRefused(change) is { } reason)
+            {
+                throw new ArgumentException(reason, nameof(changes));
+            }
+
+            var threshold = thresholds[change.Key];
+            thresholds[change.Key] = threshold with
+            {
+                Value = change.Value ?? threshold.Value,
+                IsOn = change.IsOn ?? threshold.IsOn,
+            };
+        }
+
+        return this with { Thresholds = thresholds.ToImmutable() };
+    }
 }

@@ -44,6 +44,9 @@ public sealed record Finding
     /// <summary>The limit in words: "more than 2.0 kg in 3 days".</summary>
     public string Limit { get; init; } = "";
 
+    /// <summary>A word of caution that goes with it; describes, never instructs. Mostly empty.</summary>
+    public string Caution { get; init; } = "";
+
     public ImmutableArray<Evidence> Evidence { get; init; } = [];
 
     /// <summary>Keys into the source table.</summary>

@@ -1,0 +1,46 @@
+using System.Collections.Immutable;
+using HfClinic.Clinical.Picture;
+
+namespace HfClinic.Clinical.Rules;
+
+/// <summary>All rules, and how a picture is read by them.</summary>
+public static class RuleBook
+{
+    /// <summary>Every rule, one line each, in the order of the generated table.</summary>
+    public static readonly ImmutableArray<IRule> All =
+    [
+    ];
+
+    /// <summary>What every rule says about the picture.</summary>
+    public static ImmutableArray<Finding> Assess(PatientPicture picture, ClinicProtocol protocol) => Assess(All, picture, protocol);
+
+    /// <summary>What the given rules say. A rule that fails says so in its own finding; the others are not held up by it.</summary>
+    public static ImmutableArray<Finding> Assess(IEnumerable<IRule> rules, PatientPicture picture, ClinicProtocol protocol) =>
+        [.. rules.SelectMany(rule => Assess(rule, picture, protocol))];
+
+    private static ImmutableArray<Finding> Assess(IRule rule, PatientPicture picture, ClinicProtocol protocol)
+    {
+        try
+        {
+            var findings = rule.Assess(picture, protocol).ToImmutableArray();
+            var twice = findings.GroupBy(finding => finding.Subject).FirstOrDefault(group => group.Skip(1).Any());
+            return twice is null ? findings : [NotChecked(rule, $"it answered twice for '{twice.Key}'")];
+        }
+#pragma warning disable CA1031 // Whatever a rule throws, the patient's other rules must still be read and the failure be seen.
+        catch (Exception fault)
+#pragma warning restore CA1031
+        {
+            return [NotChecked(rule, $"{fault.GetType().Name}: {fault.Message}")];
+        }
+    }
+
+    private static Finding NotChecked(IRule rule, string fault) => new()
+    {
+        RuleId = rule.Id,
+        RuleVersion = rule.Version,
+        Outcome = Outcome.CouldNotBeChecked,
+        Statement = $"{rule.Title} could not be checked",
+        SourceKeys = rule.SourceKeys,
+        Missing = fault,
+    };
+}
