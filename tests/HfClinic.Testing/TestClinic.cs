@@ -1,7 +1,9 @@
+using HfClinic.Records;
+using HfClinic.Records.Access;
+using HfClinic.Records.Storage;
 using HfClinic.Testing.Databases;
-using Microsoft.Extensions.Configuration;
+using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
-using Microsoft.Extensions.Logging;
 using Microsoft.Extensions.Time.Testing;
 
 namespace HfClinic.Testing;
@@ -35,10 +37,20 @@ public sealed class TestClinic : IAsyncDisposable
 
     public FakeTimeProvider Clock { get; }
 
+    /// <summary>A person of the given role.</summary>
+    public static Actor As(ClinicRole role) => new(Guid.Empty, $"Test {role}", [role]);
+
+    /// <summary>One of the clinic's services.</summary>
+    public T Get<T>()
+        where T : notnull => Services.GetRequiredService<T>();
+
+    /// <summary>A context of its own, for looking.</summary>
+    public ClinicDb OpenDb() => Get<IDbContextFactory<ClinicDb>>().CreateDbContext();
+
     public ServiceProvider Services { get; }
 
     /// <param name="engine">The database engine.</param>
-    /// <param name="template">The starting content; <see cref="DatabaseTemplate.Empty"/> unless given.</param>
+    /// <param name="template">The starting content; <see cref="Templates.Ready"/> unless given.</param>
     /// <param name="now">Where the clock stands; <see cref="UsualStart"/> unless given.</param>
     /// <param name="configure">Adds or replaces services after the clinic's own.</param>
     public static async Task<TestClinic> StartAsync(
@@ -47,16 +59,14 @@ public sealed class TestClinic : IAsyncDisposable
         DateTimeOffset? now = null,
         Action<IServiceCollection>? configure = null)
     {
-        var database = await TestDatabases.CreateAsync(engine, template ?? DatabaseTemplate.Empty);
+        var database = await TestDatabases.CreateAsync(engine, template ?? Templates.Ready);
         var clock = new FakeTimeProvider(now ?? UsualStart);
         var services = new ServiceCollection();
-        services.AddSingleton<IConfiguration>(new ConfigurationBuilder()
-            .AddInMemoryCollection([new("ConnectionStrings:Clinic", database.ConnectionString)])
-            .Build());
-        services.AddLogging(logging => logging.SetMinimumLevel(LogLevel.Warning));
-        services.AddSingleton<TimeProvider>(clock);
+        services.AddClinic(database.ConnectionString, clock);
         configure?.Invoke(services);
-        return new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        var clinic = new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        await clinic.Get<ClinicStorage>().PrepareAsync(CancellationToken.None);
+        return clinic;
     }
 
     public async ValueTask DisposeAsync()
