@@ -1,4 +1,7 @@
+using HfClinic.Records;
+using HfClinic.Records.Storage;
 using HfClinic.Testing.Databases;
+using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.Configuration;
 using Microsoft.Extensions.DependencyInjection;
 using Microsoft.Extensions.Logging;
@@ -21,12 +24,15 @@ public sealed class TestClinic : IAsyncDisposable
     public static DateTimeOffset UsualStart { get; } = new(2026, 3, 31, 8, 0, 0, TimeSpan.Zero);
 
     private readonly TestDatabase _database;
+    private readonly ServiceProvider _services;
+    private readonly AsyncServiceScope _scope;
 
     private TestClinic(TestDatabase database, FakeTimeProvider clock, ServiceProvider services)
     {
         _database = database;
+        _services = services;
+        _scope = services.CreateAsyncScope();
         Clock = clock;
-        Services = services;
     }
 
     public DatabaseEngine Engine => _database.Engine;
@@ -35,10 +41,15 @@ public sealed class TestClinic : IAsyncDisposable
 
     public FakeTimeProvider Clock { get; }
 
-    public ServiceProvider Services { get; }
+    /// <summary>One of the clinic's services.</summary>
+    public T Get<T>()
+        where T : notnull => _scope.ServiceProvider.GetRequiredService<T>();
+
+    /// <summary>The record itself, through a context of its own: what is really stored. The caller disposes it.</summary>
+    public Task<ClinicDb> OpenDbAsync() => Get<IDbContextFactory<ClinicDb>>().CreateDbContextAsync();
 
     /// <param name="engine">The database engine.</param>
-    /// <param name="template">The starting content; <see cref="DatabaseTemplate.Empty"/> unless given.</param>
+    /// <param name="template">The starting content; <see cref="ClinicTemplates.Migrated"/> unless given.</param>
     /// <param name="now">Where the clock stands; <see cref="UsualStart"/> unless given.</param>
     /// <param name="configure">Adds or replaces services after the clinic's own.</param>
     public static async Task<TestClinic> StartAsync(
@@ -47,7 +58,7 @@ public sealed class TestClinic : IAsyncDisposable
         DateTimeOffset? now = null,
         Action<IServiceCollection>? configure = null)
     {
-        var database = await TestDatabases.CreateAsync(engine, template ?? DatabaseTemplate.Empty);
+        var database = await TestDatabases.CreateAsync(engine, template ?? ClinicTemplates.Migrated);
         var clock = new FakeTimeProvider(now ?? UsualStart);
         var services = new ServiceCollection();
         services.AddSingleton<IConfiguration>(new ConfigurationBuilder()
@@ -55,13 +66,15 @@ public sealed class TestClinic : IAsyncDisposable
             .Build());
         services.AddLogging(logging => logging.SetMinimumLevel(LogLevel.Warning));
         services.AddSingleton<TimeProvider>(clock);
+        services.AddDbContextFactory<ClinicDb>((_, options) => StorageChoice.From(database.ConnectionString).Configure(options));
         configure?.Invoke(services);
         return new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
     }
 
     public async ValueTask DisposeAsync()
     {
-        await Services.DisposeAsync();
+        await _scope.DisposeAsync();
+        await _services.DisposeAsync();
         await _database.DisposeAsync();
     }
 }
