@@ -28,12 +28,9 @@ public sealed class ReassessPatient(PatientPictureLoader pictures, ProtocolInFor
 
         var flags = await StandingFlagsAsync(db, patientId, scope.Today, cancellation);
         var changes = FlagReconciler.Reconcile([.. flags.Select(ToLive)], findings, RuleBook.All, scope.Today);
-        foreach (var change in changes)
-        {
-            Apply(scope, flags, change, patientId, inForce.Version);
-        }
-
+        var changed = changes.Select(change => (Flag: Apply(scope, flags, change, patientId, inForce.Version), Change: change)).ToList();
         await db.SaveChangesAsync(cancellation);
+        db.FlagSteps.AddRange(changed.Select(step => OpenFlags.Step(scope, step.Flag, KindOf(step.Change.Kind), NoteOf(step.Flag, step.Change))));
         await summaries.WriteAsync(scope, patient, picture, findings, flags, cancellation);
     }
 
@@ -47,7 +44,7 @@ public sealed class ReassessPatient(PatientPictureLoader pictures, ProtocolInFor
             .OrderBy(flag => flag.Id).ToListAsync(cancellation);
     }
 
-    private static void Apply(WorkScope scope, List<Flag> flags, FlagChange change, long patientId, int protocolVersion)
+    private static Flag Apply(WorkScope scope, List<Flag> flags, FlagChange change, long patientId, int protocolVersion)
     {
         var flag = change.Before is { } before
             ? flags.Single(standing => standing.Id == before.Id)
@@ -67,7 +64,7 @@ public sealed class ReassessPatient(PatientPictureLoader pictures, ProtocolInFor
         flag.NoLongerMetOn = after.IsMet ? null : flag.NoLongerMetOn ?? scope.Today;
         Settle(scope, flag, change);
         flag.Version++;
-        AddStep(scope, flag, change);
+        return flag;
     }
 
     private static Flag Added(WorkScope scope, List<Flag> flags, FlagChange change, long patientId)
@@ -110,16 +107,7 @@ public sealed class ReassessPatient(PatientPictureLoader pictures, ProtocolInFor
         }
     }
 
-    private static void AddStep(WorkScope scope, Flag flag, FlagChange change)
-    {
-        var step = OpenFlags.Step(scope, flag, KindOf(change.Kind), change.Kind == FlagChangeKind.Clear ? flag.ClearedBecause : null);
-        if (flag.Id == 0)
-        {
-            scope.Db.Entry(step).Reference<Flag>("Flag").CurrentValue = flag;
-        }
-
-        scope.Db.FlagSteps.Add(step);
-    }
+    private static string? NoteOf(Flag flag, FlagChange change) => change.Kind == FlagChangeKind.Clear ? flag.ClearedBecause : null;
 
     private static string WhatCleared(FlagChange change) => change.Finding switch
     {
