@@ -1,10 +1,9 @@
 using HfClinic.Records;
+using HfClinic.Records.Access;
 using HfClinic.Records.Storage;
 using HfClinic.Testing.Databases;
 using Microsoft.EntityFrameworkCore;
-using Microsoft.Extensions.Configuration;
 using Microsoft.Extensions.DependencyInjection;
-using Microsoft.Extensions.Logging;
 using Microsoft.Extensions.Time.Testing;
 
 namespace HfClinic.Testing;
@@ -24,15 +23,12 @@ public sealed class TestClinic : IAsyncDisposable
     public static DateTimeOffset UsualStart { get; } = new(2026, 3, 31, 8, 0, 0, TimeSpan.Zero);
 
     private readonly TestDatabase _database;
-    private readonly ServiceProvider _services;
-    private readonly AsyncServiceScope _scope;
 
     private TestClinic(TestDatabase database, FakeTimeProvider clock, ServiceProvider services)
     {
         _database = database;
-        _services = services;
-        _scope = services.CreateAsyncScope();
         Clock = clock;
+        Services = services;
     }
 
     public DatabaseEngine Engine => _database.Engine;
@@ -41,15 +37,20 @@ public sealed class TestClinic : IAsyncDisposable
 
     public FakeTimeProvider Clock { get; }
 
+    /// <summary>A person of the given role.</summary>
+    public static Actor As(ClinicRole role) => new(Guid.Empty, $"Test {role}", [role]);
+
     /// <summary>One of the clinic's services.</summary>
     public T Get<T>()
-        where T : notnull => _scope.ServiceProvider.GetRequiredService<T>();
+        where T : notnull => Services.GetRequiredService<T>();
 
-    /// <summary>The record itself, through a context of its own: what is really stored. The caller disposes it.</summary>
-    public Task<ClinicDb> OpenDbAsync() => Get<IDbContextFactory<ClinicDb>>().CreateDbContextAsync();
+    /// <summary>A context of its own, for looking.</summary>
+    public ClinicDb OpenDb() => Get<IDbContextFactory<ClinicDb>>().CreateDbContext();
+
+    public ServiceProvider Services { get; }
 
     /// <param name="engine">The database engine.</param>
-    /// <param name="template">The starting content; <see cref="ClinicTemplates.Migrated"/> unless given.</param>
+    /// <param name="template">The starting content; <see cref="Templates.Ready"/> unless given.</param>
     /// <param name="now">Where the clock stands; <see cref="UsualStart"/> unless given.</param>
     /// <param name="configure">Adds or replaces services after the clinic's own.</param>
     public static async Task<TestClinic> StartAsync(
@@ -58,23 +59,19 @@ public sealed class TestClinic : IAsyncDisposable
         DateTimeOffset? now = null,
         Action<IServiceCollection>? configure = null)
     {
-        var database = await TestDatabases.CreateAsync(engine, template ?? ClinicTemplates.Migrated);
+        var database = await TestDatabases.CreateAsync(engine, template ?? Templates.Ready);
         var clock = new FakeTimeProvider(now ?? UsualStart);
         var services = new ServiceCollection();
-        services.AddSingleton<IConfiguration>(new ConfigurationBuilder()
-            .AddInMemoryCollection([new("ConnectionStrings:Clinic", database.ConnectionString)])
-            .Build());
-        services.AddLogging(logging => logging.SetMinimumLevel(LogLevel.Warning));
-        services.AddSingleton<TimeProvider>(clock);
-        services.AddDbContextFactory<ClinicDb>((_, options) => StorageChoice.From(database.ConnectionString).Configure(options));
+        services.AddClinic(database.ConnectionString, clock);
         configure?.Invoke(services);
-        return new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        var clinic = new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        await clinic.Get<ClinicStorage>().PrepareAsync(CancellationToken.None);
+        return clinic;
     }
 
     public async ValueTask DisposeAsync()
     {
-        await _scope.DisposeAsync();
-        await _services.DisposeAsync();
+        await Services.DisposeAsync();
         await _database.DisposeAsync();
     }
 }
