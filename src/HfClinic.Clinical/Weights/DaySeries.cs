@@ -21,7 +21,11 @@ public static class DaySeries
     /// The day series in order of day, days without an accepted reading left out. The order of the input does not matter;
     /// of two readings at the same time the one stored first (lower id) counts.
     /// </summary>
-    public static ImmutableArray<DayWeight> From(IEnumerable<WeightReading> readings)
+    public static ImmutableArray<DayWeight> From(IEnumerable<WeightReading> readings) =>
+        [.. ReadingsOf(readings).Select(reading => new DayWeight(reading.Day, reading.Weight.Grams))];
+
+    /// <summary>The day series as the very readings that stand for each day, so that evidence can point to them.</summary>
+    public static ImmutableArray<WeightReading> ReadingsOf(IEnumerable<WeightReading> readings)
     {
         ArgumentNullException.ThrowIfNull(readings);
         var chosen = new SortedDictionary<DateOnly, WeightReading>();
@@ -33,7 +37,7 @@ public static class DaySeries
             }
         }
 
-        return [.. chosen.Values.Select(reading => new DayWeight(reading.Day, reading.Weight.Grams))];
+        return [.. chosen.Values];
     }
 
     private static bool GoesBefore(WeightReading candidate, WeightReading other) =>

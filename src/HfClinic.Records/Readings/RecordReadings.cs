@@ -42,7 +42,7 @@ public sealed record TakenReadings
 public sealed record RecordedReadings(IReadOnlyList<long> ReadingIds, HoldReason? Held);
 
 /// <summary>Records readings typed by staff: called in, or measured in the clinic.</summary>
-public sealed class RecordReadings(ClinicWork work, WeightScreening screening)
+public sealed class RecordReadings(ClinicWork work)
 {
     /// <summary>Records what was given. A weight that does not fit is set aside with its likely reason, never dropped.</summary>
     /// <exception cref="RefusedException">Nothing was given, or a value cannot be.</exception>
@@ -57,7 +57,7 @@ public sealed class RecordReadings(ClinicWork work, WeightScreening screening)
 
             var patient = await scope.TakePatientAsync(patientId, cancellation);
             var held = taken.Weight is { } weight
-                ? await screening.CheckAsync(scope.Db, patient, weight, DateOnly.FromDateTime(taken.LocalTime), cancellation)
+                ? await WeightScreening.CheckAsync(scope.Db, patient, weight, DateOnly.FromDateTime(taken.LocalTime), cancellation)
                 : null;
             var rows = Rows(scope, patientId, taken, held);
             await RefuseDuplicatesAsync(scope.Db, patientId, rows, cancellation);

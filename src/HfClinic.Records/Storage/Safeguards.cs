@@ -6,6 +6,7 @@ namespace HfClinic.Records.Storage;
 internal static class Safeguards
 {
     private static readonly string[] AppendOnly = ["AuditEntries", "FlagSteps", "ReadingDecisions"];
+    private static readonly string[] Forbidden = ["UPDATE", "DELETE"];
 
     /// <summary>Puts the triggers in place; harmless when they stand already.</summary>
     public static async Task ApplyAsync(ClinicDb db, bool isPostgreSql, CancellationToken cancellation)
@@ -18,7 +19,7 @@ internal static class Safeguards
 
     private static IEnumerable<string> ForSqlite() =>
         from table in AppendOnly
-        from verb in new[] { "UPDATE", "DELETE" }
+        from verb in Forbidden
         select $"""
             CREATE TRIGGER IF NOT EXISTS "{table}_no_{verb.ToLowerInvariant()}" BEFORE {verb} ON "{table}"
             BEGIN SELECT RAISE(ABORT, '{table} may only be added to'); END

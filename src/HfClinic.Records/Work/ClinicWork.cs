@@ -42,7 +42,7 @@ public sealed class ClinicWork(
         }
         catch (DbUpdateConcurrencyException conflict)
         {
-            throw new ChangedMeanwhileException("Somebody else changed this meanwhile. Nothing of yours was saved.", conflict.Entries.FirstOrDefault()?.Entity);
+            throw new ChangedMeanwhileException("Somebody else changed this meanwhile. Nothing of yours was saved.", conflict.Entries is [var entry, ..] ? entry.Entity : null);
         }
 
         await transaction.CommitAsync(cancellation);
