@@ -1,0 +1,53 @@
+using Microsoft.EntityFrameworkCore;
+
+namespace HfClinic.Records.Audit;
+
+/// <summary>What of the record of access is wanted; empty fields do not narrow it.</summary>
+public sealed record AuditRequest(DateTime? From = null, DateTime? Until = null, string Person = "", long? PatientId = null, int Skip = 0, int Take = 100);
+
+/// <summary>A line with the name of the patient it concerns.</summary>
+public sealed record AuditRow(AuditEntry Entry, string? PatientName);
+
+/// <summary>Reads the record of access, newest first.</summary>
+public sealed class AuditQuery(IDbContextFactory<ClinicDb> databases)
+{
+    public async Task<IReadOnlyList<AuditRow>> RowsAsync(AuditRequest request, CancellationToken cancellation = default)
+    {
+        await using var db = await databases.CreateDbContextAsync(cancellation);
+        return await (from entry in Filtered(db, request).OrderByDescending(entry => entry.Id).Skip(request.Skip).Take(request.Take)
+                      join patient in db.Patients on entry.PatientId equals patient.Id into patients
+                      from patient in patients.DefaultIfEmpty()
+                      orderby entry.Id descending
+                      select new AuditRow(entry, patient == null ? null : patient.FamilyName + ", " + patient.GivenName))
+            .ToListAsync(cancellation);
+    }
+
+    public async Task<int> CountAsync(AuditRequest request, CancellationToken cancellation = default)
+    {
+        await using var db = await databases.CreateDbContextAsync(cancellation);
+        return await Filtered(db, request).CountAsync(cancellation);
+    }
+
+    private static IQueryable<AuditEntry> Filtered(ClinicDb db, AuditRequest request)
+    {
+        var entries = db.AuditEntries.AsNoTracking();
+        if (request.From is { } from)
+        {
+            entries = entries.Where(entry => entry.At >= from);
+        }
+
+        if (request.Until is { } until)
+        {
+            entries = entries.Where(entry => entry.At < until);
+        }
+
+        if (request.PatientId is { } patient)
+        {
+            entries = entries.Where(entry => entry.PatientId == patient);
+        }
+
+        return string.IsNullOrWhiteSpace(request.Person)
+            ? entries
+            : entries.Where(entry => entry.ByName.ToLower().Contains(request.Person.Trim().ToLower()));
+    }
+}

@@ -1,0 +1,91 @@
+using HfClinic.Clinical.Rules;
+using HfClinic.Records.Patients;
+using Microsoft.EntityFrameworkCore;
+using Microsoft.EntityFrameworkCore.Metadata.Builders;
+
+namespace HfClinic.Records.Flags;
+
+/// <summary>
+/// What the lists show of a patient, stored: written by reassessment only, so that a list costs what its rows cost.
+/// </summary>
+public sealed class PatientSummary
+{
+    public long PatientId { get; set; }
+
+    /// <summary>Enrolled and weighing at home: stands on Daily weights.</summary>
+    public bool OnDailyWeights { get; set; }
+
+    public int? LastGrams { get; set; }
+
+    public DateOnly? LastWeightDay { get; set; }
+
+    /// <summary>UTC.</summary>
+    public DateTime? LastWeightAt { get; set; }
+
+    /// <summary>Grams against the lowest of the day before; null when there was none.</summary>
+    public int? Gain1Day { get; set; }
+
+    public int? Gain3Days { get; set; }
+
+    public int? Gain7Days { get; set; }
+
+    public int? TargetGrams { get; set; }
+
+    public DateOnly? TargetFrom { get; set; }
+
+    /// <summary>The most urgent open flag that is not put off; null when there is none.</summary>
+    public Urgency? WorstUrgency { get; set; }
+
+    /// <summary>When the oldest open flag of that urgency was raised, UTC.</summary>
+    public DateTime? WorstSince { get; set; }
+
+    /// <summary>Statements of the open flags, the most urgent first, separated by "; ".</summary>
+    public string Why { get; set; } = "";
+
+    /// <summary>Rule identifiers of the open flags that are not put off, separated by spaces.</summary>
+    public string OpenRules { get; set; } = "";
+
+    /// <summary>What could not be told, and why, separated by "; ". Never shown as "fine".</summary>
+    public string NotChecked { get; set; } = "";
+
+    /// <summary>A rule failed for this patient: the row says so.</summary>
+    public bool CheckFailed { get; set; }
+
+    public int OpenFlags { get; set; }
+
+    public int PutOffFlags { get; set; }
+
+    public int HeldReadings { get; set; }
+
+    public bool IsSilent { get; set; }
+
+    /// <summary>Current loop diuretic with its dose in words.</summary>
+    public string LoopDiuretic { get; set; } = "";
+
+    public DateOnly? LastContactDay { get; set; }
+
+    public string LastContact { get; set; } = "";
+
+    public int OpenQuestions { get; set; }
+
+    /// <summary>The clinic day this row was computed for.</summary>
+    public DateOnly AsOf { get; set; }
+
+    public int Version { get; set; }
+}
+
+internal sealed class PatientSummaryMapping : IEntityTypeConfiguration<PatientSummary>
+{
+    public void Configure(EntityTypeBuilder<PatientSummary> summary)
+    {
+        summary.HasKey(s => s.PatientId);
+        summary.Property(s => s.PatientId).ValueGeneratedNever();
+        summary.HasOne<Patient>().WithOne().HasForeignKey<PatientSummary>(s => s.PatientId).OnDelete(DeleteBehavior.Restrict);
+        summary.HasIndex(s => new { s.OnDailyWeights, s.WorstUrgency, s.WorstSince });
+        summary.Property(s => s.OpenRules).HasMaxLength(1000);
+        summary.Property(s => s.NotChecked).HasMaxLength(2000);
+        summary.Property(s => s.Why).HasMaxLength(2000);
+        summary.Property(s => s.LoopDiuretic).HasMaxLength(200);
+        summary.Property(s => s.LastContact).HasMaxLength(200);
+    }
+}

@@ -1,7 +1,0 @@
-namespace HfClinic.Browser.Tests;
-
-public class SolutionTests
-{
-    [Fact]
-    public void Runs() => Assert.NotNull(typeof(SolutionTests).Assembly);
-}
