@@ -66,6 +66,8 @@ public static class ClinicRecords
     private static void AddQueries(IServiceCollection services)
     {
         services.AddSingleton<DailyWeightsQuery>();
+        services.AddSingleton<WeightStripQuery>();
+        services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
