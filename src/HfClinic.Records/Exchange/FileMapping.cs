@@ -37,7 +37,7 @@ public sealed record FileMapping
         foreach (var info in ImportFields.Of(kind))
         {
             var at = look.Columns.ToList().FindIndex(column => ImportFields.Means(info, column.Heading));
-            if (at >= 0 && !columns.Values.Contains(at))
+            if (at >= 0 && !columns.ContainsValue(at))
             {
                 columns.Add(info.Field, at);
             }

@@ -2,6 +2,7 @@ using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
 using HfClinic.Clinical.Weights;
 using HfClinic.Records.Readings;
+using HfClinic.Records.Settings;
 using HfClinic.Records.Work;
 using Microsoft.EntityFrameworkCore;
 
@@ -45,13 +46,13 @@ internal sealed class WeightScreens
         foreach (var known in patients.Where(group => CanGoOn(group, versions)))
         {
             var screen = carried[known[0].PatientId];
-            Take(screen, known, []);
+            Take(screen, known, [], scope.Clock);
             screen.Version = versions[known[0].PatientId];
         }
 
         foreach (var chunk in patients.Where(group => !IsCurrent(group[0].PatientId, versions)).Chunk(PatientsAtOnce))
         {
-            await BuildAsync(scope.Db, chunk, versions, cancellation);
+            await BuildAsync(scope, chunk, versions, cancellation);
         }
     }
 
@@ -63,8 +64,9 @@ internal sealed class WeightScreens
         carried.TryGetValue(patientId, out var screen) && screen.Version == versions[patientId];
 
     private async Task BuildAsync(
-        ClinicDb db, List<NewWeight>[] groups, IReadOnlyDictionary<long, int> versions, CancellationToken cancellation)
+        WorkScope scope, List<NewWeight>[] groups, IReadOnlyDictionary<long, int> versions, CancellationToken cancellation)
     {
+        var db = scope.Db;
         var ids = groups.Select(group => group[0].PatientId).ToList();
         var from = groups[0][0].Line.Day.AddDays(-HistoryDays);
         var onRecord = (await db.Readings.AsNoTracking()
@@ -82,7 +84,7 @@ internal sealed class WeightScreens
                 Version = versions[patientId],
             };
             var known = onRecord[patientId].Where(recorded => recorded.Day >= group[0].Line.Day.AddDays(-HistoryDays)).ToList();
-            Take(screen, group, known);
+            Take(screen, group, known, scope.Clock);
             carried[patientId] = screen;
             if (known.Exists(recorded => recorded.Day > screen.LastDay))
             {
@@ -92,14 +94,14 @@ internal sealed class WeightScreens
     }
 
     /// <summary>Weights on record go in unchecked before a new one of the same moment; held ones are screened again, so that a second alike confirms.</summary>
-    private static void Take(Carried screen, List<NewWeight> weights, List<Recorded> known)
+    private static void Take(Carried screen, List<NewWeight> weights, List<Recorded> known, ClinicClock clock)
     {
         var onRecord = new Queue<Recorded>(known.OrderBy(recorded => recorded.MeasuredAt));
         foreach (var weight in weights)
         {
             while (onRecord.TryPeek(out var next) && next.MeasuredAt <= weight.Line.MeasuredAt)
             {
-                TakeRecorded(screen, onRecord.Dequeue());
+                TakeRecorded(screen, onRecord.Dequeue(), clock);
             }
 
             var screened = screen.Screen.Take(weight.Line.LocalTime, weight.Line.Weight!.Value, screen.Household);
@@ -108,9 +110,9 @@ internal sealed class WeightScreens
         }
     }
 
-    private static void TakeRecorded(Carried screen, Recorded recorded)
+    private static void TakeRecorded(Carried screen, Recorded recorded, ClinicClock clock)
     {
-        var localTime = recorded.Day.ToDateTime(TimeOnly.FromDateTime(recorded.MeasuredAt));
+        var localTime = clock.ToLocal(recorded.MeasuredAt);
         if (recorded.IsHeld)
         {
             screen.Screen.Take(localTime, new Weight(recorded.Grams), screen.Household);
