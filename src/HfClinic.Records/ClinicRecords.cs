@@ -2,6 +2,7 @@ using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.DailyWeights;
+using HfClinic.Records.Exchange;
 using HfClinic.Records.Flags;
 using HfClinic.Records.Medicines;
 using HfClinic.Records.Patients;
@@ -61,6 +62,9 @@ public static class ClinicRecords
         services.AddSingleton<MedicineCourses>();
         services.AddSingleton<SetPatientThreshold>();
         services.AddSingleton<AuditVerification>();
+        services.TryAddSingleton(new ImportLimits());
+        services.AddSingleton<ImportAftermath>();
+        services.AddSingleton<ImportFile>();
     }
 
     private static void AddQueries(IServiceCollection services)
@@ -71,6 +75,7 @@ public static class ClinicRecords
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
+        services.AddSingleton<ImportReports>();
     }
 
     private static void AddPeople(IServiceCollection services)
