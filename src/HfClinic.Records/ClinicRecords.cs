@@ -1,5 +1,6 @@
 using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
+using HfClinic.Records.Chart;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.DailyWeights;
 using HfClinic.Records.Flags;
@@ -52,6 +53,7 @@ public static class ClinicRecords
         services.AddSingleton<SetTargetWeight>();
         services.AddSingleton<RecordReadings>();
         services.AddSingleton<DecideReading>();
+        services.AddSingleton<StrikeOutSymptoms>();
         services.AddSingleton<RecordContact>();
         services.AddSingleton<AnswerFlag>();
         services.AddSingleton<PutOffFlag>();
@@ -67,6 +69,7 @@ public static class ClinicRecords
     {
         services.AddSingleton<DailyWeightsQuery>();
         services.AddSingleton<PatientSearch>();
+        services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
     }
