@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using HfClinic.Clinical.Picture;
+using HfClinic.Clinical.Rules.Volume;
 
 namespace HfClinic.Clinical.Rules;
 
@@ -9,6 +10,16 @@ public static class RuleBook
     /// <summary>Every rule, one line each, in the order of the generated table.</summary>
     public static readonly ImmutableArray<IRule> All =
     [
+        new GainInThreeDays(),
+        new GainInSevenDays(),
+        new GainInOneDayThreePounds(),
+        new GainInOneDayTwoPounds(),
+        new LossInSevenDays(),
+        new AboveTarget(),
+        new SymptomsReported(),
+        new NoWeight(),
+        new HeldReadingWaiting(),
+        new TargetWeightOld(),
     ];
 
     /// <summary>What every rule says about the picture.</summary>

@@ -33,6 +33,20 @@ public static class Wording
         return $"{Fixed(measured, decimals)} {Symbol(unit)}";
     }
 
+    /// <summary>A limit as it was set: "2.0 kg", "1.75 kg"; one of whole pounds names them too: "2.3 kg (5 lb)".</summary>
+    public static string Limit(Weight limit, WeightUnit unit)
+    {
+        if (unit == WeightUnit.Pounds)
+        {
+            return Weight(limit, unit);
+        }
+
+        var pounds = decimal.Round(limit.Pounds);
+        return Values.Weight.FromPounds(pounds) == limit
+            ? string.Create(CultureInfo.InvariantCulture, $"{Weight(limit, unit)} ({pounds} lb)")
+            : string.Create(CultureInfo.InvariantCulture, $"{limit.Kilograms:0.0##} kg");
+    }
+
     /// <summary>"kg" or "lb".</summary>
     public static string Symbol(WeightUnit unit) => unit == WeightUnit.Pounds ? "lb" : "kg";
 

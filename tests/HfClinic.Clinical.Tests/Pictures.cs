@@ -1,0 +1,47 @@
+using HfClinic.Clinical.Picture;
+using HfClinic.Clinical.Rules;
+using HfClinic.Clinical.Values;
+
+namespace HfClinic.Clinical.Tests;
+
+/// <summary>Short ways to say what a patient's picture holds. Days count from <see cref="Today"/>: −1 is yesterday.</summary>
+internal static class Pictures
+{
+    public static readonly DateOnly Today = new(2026, 3, 3);
+
+    public static readonly ClinicProtocol Defaults = ProtocolDefaults.Load();
+
+    /// <summary>Someone who weighs at home and of whom nothing else is known.</summary>
+    public static PatientPicture AtHome => new() { AsOf = Today, EnrolledOn = Today.AddYears(-1), WeighsAtHome = true };
+
+    public static PatientPicture Weighed(this PatientPicture picture, int day, int grams, HoldReason? held = null)
+    {
+        var time = Today.AddDays(day).ToDateTime(new TimeOnly(7, 0));
+        var reading = new WeightReading(100 + picture.Weights.Length, time, new Weight(grams), held is { } reason ? new HeldReading(reason, time) : null);
+        return picture with { Weights = [.. picture.Weights.Append(reading).OrderBy(one => one.LocalTime)] };
+    }
+
+    public static PatientPicture Told(this PatientPicture picture, int day, Symptoms symptoms) =>
+        picture with { Symptoms = picture.Symptoms.Add(new SymptomReport(200, Today.AddDays(day), symptoms)) };
+
+    public static PatientPicture Systolic(this PatientPicture picture, int day, int value) => picture with
+    {
+        Vitals = picture.Vitals.Add(new VitalReading(
+            300, ReadingKind.SystolicPressure, Today.AddDays(day).ToDateTime(new TimeOnly(7, 5)), value)),
+    };
+
+    public static PatientPicture Target(this PatientPicture picture, int day, int grams) => picture with
+    {
+        TargetWeights = picture.TargetWeights.Add(new TargetWeight(400, Today.AddDays(day), new Weight(grams), "a prescriber")),
+    };
+
+    public static PatientPicture Dose(this PatientPicture picture, string medicine, decimal milligrams, int from, int? until = null) => picture with
+    {
+        DoseCourses = picture.DoseCourses.Add(new DoseCourse(
+            500, medicine, milligrams, 1, Today.AddDays(from), until is { } day ? Today.AddDays(day) : null)),
+    };
+
+    /// <summary>The one answer of a rule that answers once.</summary>
+    public static Finding Read(this IRule rule, PatientPicture picture, ClinicProtocol? protocol = null) =>
+        Assert.Single(rule.Assess(picture, protocol ?? Defaults));
+}
