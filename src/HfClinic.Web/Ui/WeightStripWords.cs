@@ -1,0 +1,63 @@
+namespace HfClinic.Web.Ui;
+
+/// <summary>The strip as sentences, for those who hear the page and for the tooltip.</summary>
+public static class WeightStripWords
+{
+    public static string Describe(WeightStripData data)
+    {
+        var readings = data.Readings.Where(r => r.Day >= data.From && r.Day <= data.To).OrderBy(r => r.Day).ToList();
+        var used = readings.Where(r => !r.Held).ToList();
+        var held = readings.Where(r => r.Held).ToList();
+        var days = data.To.DayNumber - data.From.DayNumber + 1;
+        List<string> sentences =
+        [
+            $"Weights from {Wording.Day(data.From)} to {Wording.Day(data.To)}, {Wording.Count(days, "day", "days")}: {Span(used)}",
+        ];
+        if (MissingDays(data).Count() is > 0 and var missing)
+        {
+            sentences.Add($"{Wording.Count(missing, "day", "days")} without a weight");
+        }
+
+        if (data.Targets.Where(t => t.From <= data.To).MaxBy(t => t.From) is { } target)
+        {
+            sentences.Add($"Target {Wording.Kilograms(target.Grams)} kg");
+        }
+
+        if (used.Count(r => r.Raised) is > 0 and var raised)
+        {
+            sentences.Add($"{Wording.Count(raised, "weight", "weights")} raised a flag");
+        }
+
+        sentences.AddRange(held.Select(r => $"{Wording.Kilograms(r.Grams)} kg on {Wording.Day(r.Day)} is held to be checked"));
+        sentences.AddRange(ChangesIn(data).Select(c => $"{Wording.Day(c.Day)}: {c.What}"));
+        return string.Join(". ", sentences) + ".";
+    }
+
+    /// <summary>Expected days with no weight of any kind, held ones included.</summary>
+    public static IEnumerable<DateOnly> MissingDays(WeightStripData data)
+    {
+        var first = data.ExpectedFrom > data.From ? data.ExpectedFrom.Value : data.From;
+        var last = data.ExpectedTo < data.To ? data.ExpectedTo.Value : data.To;
+        var weighed = data.Readings.Select(r => r.Day).ToHashSet();
+        for (var day = first; day <= last; day = day.AddDays(1))
+        {
+            if (!weighed.Contains(day))
+            {
+                yield return day;
+            }
+        }
+    }
+
+    public static IEnumerable<StripChange> ChangesIn(WeightStripData data) =>
+        data.DiureticChanges.Where(c => c.Day >= data.From && c.Day <= data.To).OrderBy(c => c.Day);
+
+    private static string Span(List<StripReading> used) => used.Count switch
+    {
+        0 => "none",
+        1 => $"one, {Weight(used[0])}",
+        _ => $"{Wording.Count(used.Count, "weight", "weights")}, first {Weight(used[0])}, last {Weight(used[^1])}, " +
+             $"lowest {Wording.Kilograms(used.Min(r => r.Grams))} kg, highest {Wording.Kilograms(used.Max(r => r.Grams))} kg",
+    };
+
+    private static string Weight(StripReading reading) => $"{Wording.Kilograms(reading.Grams)} kg on {Wording.Day(reading.Day)}";
+}
