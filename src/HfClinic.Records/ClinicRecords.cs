@@ -68,6 +68,8 @@ public static class ClinicRecords
     private static void AddQueries(IServiceCollection services)
     {
         services.AddSingleton<DailyWeightsQuery>();
+        services.AddSingleton<WeightStripQuery>();
+        services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();

@@ -15,7 +15,7 @@ public static class ReadingChecks
     {
         var problems = new List<Problem>();
         if (taken.Weight is null && taken.SystolicPressure is null && taken.DiastolicPressure is null && taken.HeartRate is null
-            && taken.OxygenSaturation is null && taken.Symptoms == Symptoms.None)
+            && taken.OxygenSaturation is null && taken.Symptoms == Symptoms.None && !taken.AskedForSymptoms)
         {
             problems.Add(new("", "Nothing was given.", "Type a weight, a pressure, a pulse or a symptom."));
         }

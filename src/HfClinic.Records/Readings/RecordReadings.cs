@@ -31,6 +31,9 @@ public sealed record TakenReadings
 
     public Symptoms Symptoms { get; init; }
 
+    /// <summary>The person was asked about symptoms; with none told, that answer is kept too.</summary>
+    public bool AskedForSymptoms { get; init; }
+
     public string? Note { get; init; }
 
     public ReadingSource Source { get; init; } = ReadingSource.Phone;
@@ -102,7 +105,7 @@ public sealed class RecordReadings(ClinicWork work)
 
     private static void AddSymptoms(WorkScope scope, long patientId, TakenReadings taken)
     {
-        if (taken.Symptoms != Symptoms.None)
+        if (taken.Symptoms != Symptoms.None || taken.AskedForSymptoms)
         {
             scope.Db.SymptomReports.Add(new SymptomReport
             {
