@@ -1,5 +1,6 @@
 using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
+using HfClinic.Records.Chart;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.DailyWeights;
 using HfClinic.Records.Exchange;
@@ -53,6 +54,7 @@ public static class ClinicRecords
         services.AddSingleton<SetTargetWeight>();
         services.AddSingleton<RecordReadings>();
         services.AddSingleton<DecideReading>();
+        services.AddSingleton<StrikeOutSymptoms>();
         services.AddSingleton<RecordContact>();
         services.AddSingleton<AnswerFlag>();
         services.AddSingleton<PutOffFlag>();
@@ -73,6 +75,7 @@ public static class ClinicRecords
         services.AddSingleton<WeightStripQuery>();
         services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
+        services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
         services.AddSingleton<ImportReports>();

@@ -1,9 +1,13 @@
+using HfClinic.Records.Chart;
 using Microsoft.EntityFrameworkCore;
 
 namespace HfClinic.Records.Audit;
 
 /// <summary>What of the record of access is wanted; empty fields do not narrow it.</summary>
-public sealed record AuditRequest(DateTime? From = null, DateTime? Until = null, string Person = "", long? PatientId = null, int Skip = 0, int Take = 100);
+/// <param name="ChangesOnly">Leaves out the openings of charts.</param>
+public sealed record AuditRequest(
+    DateTime? From = null, DateTime? Until = null, string Person = "", long? PatientId = null, int Skip = 0, int Take = 100,
+    bool ChangesOnly = false);
 
 /// <summary>A line with the name of the patient it concerns.</summary>
 public sealed record AuditRow(AuditEntry Entry, string? PatientName);
@@ -44,6 +48,11 @@ public sealed class AuditQuery(IDbContextFactory<ClinicDb> databases)
         if (request.PatientId is { } patient)
         {
             entries = entries.Where(entry => entry.PatientId == patient);
+        }
+
+        if (request.ChangesOnly)
+        {
+            entries = entries.Where(entry => entry.What != ChartQuery.Opened);
         }
 
         return string.IsNullOrWhiteSpace(request.Person)
