@@ -40,12 +40,14 @@ public static class DaySeries
         return [.. chosen.Values];
     }
 
-    private static bool GoesBefore(WeightReading candidate, WeightReading other) =>
-        Rank(candidate).CompareTo(Rank(other)) < 0;
+    /// <summary>Whether, of two readings of one day, the one at <paramref name="time"/> is the day's weight.</summary>
+    internal static bool GoesBefore(TimeOnly time, TimeOnly other) => Rank(time).CompareTo(Rank(other)) < 0;
 
-    private static (bool OutsideMorning, DateTime Time, long Id) Rank(WeightReading reading)
+    private static bool GoesBefore(WeightReading candidate, WeightReading other)
     {
-        var time = TimeOnly.FromDateTime(reading.LocalTime);
-        return (time < MorningFrom || time >= MorningUntil, reading.LocalTime, reading.Id);
+        int order = Rank(TimeOnly.FromDateTime(candidate.LocalTime)).CompareTo(Rank(TimeOnly.FromDateTime(other.LocalTime)));
+        return order < 0 || (order == 0 && candidate.Id < other.Id);
     }
+
+    private static (bool OutsideMorning, TimeOnly Time) Rank(TimeOnly time) => (time < MorningFrom || time >= MorningUntil, time);
 }

@@ -72,12 +72,15 @@ public sealed record TrendModel
         ? new TrendModel(reference.Grams / 1000.0)
         : throw new ArgumentOutOfRangeException(nameof(reference), reference, "The reference weight of a trend must be 25 to 300 kg.");
 
+    /// <summary>The least distance from expectation that counts as far, kg: 3 kg or 3.5% of the reference weight.</summary>
+    public double SmallestGate => Math.Max(3.0, 0.035 * ReferenceKilograms);
+
     /// <summary>
     /// How far from the expectation a reading may lie before it is set aside, kg: the largest of five standard deviations,
     /// 3 kg and 3.5% of the reference weight.
     /// </summary>
     /// <param name="variance">Variance of the expected reading, kg².</param>
-    public double Gate(double variance) => Math.Max(5 * Math.Sqrt(variance), Math.Max(3.0, 0.035 * ReferenceKilograms));
+    public double Gate(double variance) => Math.Max(5 * Math.Sqrt(variance), SmallestGate);
 
     private static double Square(double value) => value * value;
 }
