@@ -11,9 +11,8 @@ public class FirstPageTests(BrowserFixture browser)
         await using var app = await ClinicApp.StartAsync(engine);
         await using var window = await browser.OpenAsync(app);
 
-        var answer = await window.Page.GotoAsync("/");
+        var answer = await window.Page.APIRequest.GetAsync("/");
 
-        Assert.NotNull(answer);
         Assert.True(answer.Status < 500, $"The root page answered {answer.Status}.");
     }
 }

@@ -22,18 +22,20 @@ public sealed class TestClinic : IAsyncDisposable
     /// <summary>Where the clock stands unless a test says otherwise: a Tuesday morning, 08:00 UTC.</summary>
     public static DateTimeOffset UsualStart { get; } = new(2026, 3, 31, 8, 0, 0, TimeSpan.Zero);
 
-    private readonly TestDatabase _database;
+    private readonly TestDatabase? _database;
 
-    private TestClinic(TestDatabase database, FakeTimeProvider clock, ServiceProvider services)
+    private TestClinic(TestDatabase? database, DatabaseEngine engine, string connectionString, FakeTimeProvider clock, ServiceProvider services)
     {
         _database = database;
+        Engine = engine;
+        ConnectionString = connectionString;
         Clock = clock;
         Services = services;
     }
 
-    public DatabaseEngine Engine => _database.Engine;
+    public DatabaseEngine Engine { get; }
 
-    public string ConnectionString => _database.ConnectionString;
+    public string ConnectionString { get; }
 
     public FakeTimeProvider Clock { get; }
 
@@ -64,7 +66,17 @@ public sealed class TestClinic : IAsyncDisposable
         var services = new ServiceCollection();
         services.AddClinic(database.ConnectionString, clock);
         configure?.Invoke(services);
-        var clinic = new TestClinic(database, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        var clinic = new TestClinic(database, database.Engine, database.ConnectionString, clock, services.BuildServiceProvider(new ServiceProviderOptions { ValidateScopes = true, ValidateOnBuild = true }));
+        await clinic.Get<ClinicStorage>().PrepareAsync(CancellationToken.None);
+        return clinic;
+    }
+
+    /// <summary>A second server on the same database and clock; dispose it before the first.</summary>
+    public static async Task<TestClinic> JoinAsync(TestClinic first)
+    {
+        var services = new ServiceCollection();
+        services.AddClinic(first.ConnectionString, first.Clock);
+        var clinic = new TestClinic(null, first.Engine, first.ConnectionString, first.Clock, services.BuildServiceProvider());
         await clinic.Get<ClinicStorage>().PrepareAsync(CancellationToken.None);
         return clinic;
     }
@@ -72,6 +84,9 @@ public sealed class TestClinic : IAsyncDisposable
     public async ValueTask DisposeAsync()
     {
         await Services.DisposeAsync();
-        await _database.DisposeAsync();
+        if (_database is not null)
+        {
+            await _database.DisposeAsync();
+        }
     }
 }

@@ -86,8 +86,9 @@ public static class FlagReconciler
     private static Finding? ClearFinding(LiveFlag flag, IEnumerable<Finding> findings) => findings.FirstOrDefault(finding =>
         finding.RuleId == flag.RuleId && finding.Subject == flag.Subject && finding.Outcome == Outcome.Clear);
 
+    /// <summary>More urgent, or a whole step further; without a magnitude there was nothing yet.</summary>
     private static bool IsNews(LiveFlag flag, Finding finding, IRule rule) =>
-        finding.Urgency > flag.Urgency || finding.Magnitude - flag.Magnitude >= rule.MaterialStep;
+        finding.Urgency > flag.Urgency || (finding.Magnitude ?? 0) - (flag.Magnitude ?? 0) >= rule.MaterialStep;
 
     private static bool AnswerStands(LiveFlag flag, IRule rule, DateOnly today) =>
         today <= (flag.AnswerStandsUntil ?? (flag.AnsweredOn ?? flag.EpisodeStart).AddDays(rule.JoinDays));

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using HfClinic.Clinical.Values;
 
 namespace HfClinic.Clinical.Rules;
 

@@ -1,3 +1,4 @@
+using System.Collections.Frozen;
 using System.Collections.Immutable;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules.Volume;
@@ -21,6 +22,14 @@ public static class RuleBook
         new HeldReadingWaiting(),
         new TargetWeightOld(),
     ];
+
+    private static readonly FrozenDictionary<string, IRule> ById = All.ToFrozenDictionary(rule => rule.Id, StringComparer.Ordinal);
+
+    /// <summary>The rule of that identity, or null: a flag may be older than this rule book.</summary>
+    public static IRule? Find(string ruleId) => ById.GetValueOrDefault(ruleId);
+
+    /// <summary>The rule's name on screen; its identity when this rule book does not know it.</summary>
+    public static string TitleOf(string ruleId) => Find(ruleId)?.Title ?? ruleId;
 
     /// <summary>What every rule says about the picture.</summary>
     public static ImmutableArray<Finding> Assess(PatientPicture picture, ClinicProtocol protocol) => Assess(All, picture, protocol);

@@ -2,6 +2,7 @@ using System.Globalization;
 using HfClinic.Clinical.Flags;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
+using HfClinic.Clinical.Rules.Volume;
 
 using HfClinic.Clinical.Weights;
 using HfClinic.Records.Contacts;
@@ -61,11 +62,11 @@ public sealed class SummaryWriter(ClinicClock clock)
         summary.OpenFlags = onList.Count;
         summary.PutOffFlags = open.Count - onList.Count;
         summary.OpenRules = string.Join(' ', onList.Select(flag => flag.RuleId));
-        summary.IsSilent = onList.Exists(flag => flag.RuleId == "volume.no-weight");
+        summary.IsSilent = onList.Exists(flag => flag.RuleId == NoWeight.RuleId);
         summary.Why = Cut(string.Join(Between, onList.Select(flag => flag.Statement).Concat(failed.Select(finding => finding.Statement))));
         summary.NotChecked = Cut(string.Join(Between, findings
             .Where(finding => finding.Outcome is Outcome.CannotTell or Outcome.CouldNotBeChecked)
-            .Select(finding => $"{finding.RuleId}: {finding.Missing}")));
+            .Select(finding => $"{RuleBook.TitleOf(finding.RuleId)}: {finding.Missing}")));
         var worst = onList.Select(flag => (Urgency?)flag.Urgency).Concat(failed.Select(_ => (Urgency?)Urgency.ThisWeek)).Max();
         summary.WorstUrgency = worst;
         summary.WorstSince = onList.Where(flag => flag.Urgency == worst).Select(flag => (DateTime?)flag.RaisedAt).Min();

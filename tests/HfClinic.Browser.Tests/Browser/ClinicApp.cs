@@ -9,10 +9,12 @@ namespace HfClinic.Browser.Tests.Browser;
 /// <summary>The real web program on a real port, with a database and a data folder of its own.</summary>
 public sealed class ClinicApp : WebApplicationFactory<Program>
 {
+    private static readonly TestFolder Home = TestFolder.Create("web");
+
     private readonly TestDatabase _database;
     private readonly TimeProvider? _clock;
     private readonly IReadOnlyDictionary<string, string> _settings;
-    private readonly DirectoryInfo _data = Directory.CreateTempSubdirectory("hfclinic-web-");
+    private readonly DirectoryInfo _data = Directory.CreateDirectory(Path.Combine(Home.Path, Guid.NewGuid().ToString("N")));
 
     private ClinicApp(TestDatabase database, TimeProvider? clock, IReadOnlyDictionary<string, string> settings)
     {

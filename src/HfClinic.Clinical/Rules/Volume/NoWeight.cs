@@ -10,7 +10,10 @@ namespace HfClinic.Clinical.Rules.Volume;
 /// </summary>
 public sealed class NoWeight : VolumeRule
 {
-    public override string Id => "volume.no-weight";
+    /// <summary>Known to the lists, which count the silent.</summary>
+    public const string RuleId = "volume.no-weight";
+
+    public override string Id => RuleId;
 
     public override string Title => "No weight from home";
 

@@ -1,7 +1,6 @@
 using System.Collections.Immutable;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
-using HfClinic.Clinical.Weights;
 
 namespace HfClinic.Clinical.Rules.Volume;
 
