@@ -3,6 +3,7 @@ using HfClinic.Records.Audit;
 using HfClinic.Records.Chart;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.DailyWeights;
+using HfClinic.Records.Exchange;
 using HfClinic.Records.Flags;
 using HfClinic.Records.Medicines;
 using HfClinic.Records.Patients;
@@ -63,6 +64,9 @@ public static class ClinicRecords
         services.AddSingleton<MedicineCourses>();
         services.AddSingleton<SetPatientThreshold>();
         services.AddSingleton<AuditVerification>();
+        services.TryAddSingleton(new ImportLimits());
+        services.AddSingleton<ImportAftermath>();
+        services.AddSingleton<ImportFile>();
     }
 
     private static void AddQueries(IServiceCollection services)
@@ -74,6 +78,7 @@ public static class ClinicRecords
         services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
+        services.AddSingleton<ImportReports>();
     }
 
     private static void AddPeople(IServiceCollection services)

@@ -10,6 +10,14 @@ public sealed record Problem(string Field, string What, string Mend = "")
     public string Text => Mend.Length == 0 ? What : $"{What} {Mend}";
 }
 
+/// <summary>Reads problems beside their fields.</summary>
+public static class Problems
+{
+    /// <summary>What to show beside the field; null when nothing is wrong with it.</summary>
+    public static string? MessageFor(this IReadOnlyList<Problem> problems, string field) =>
+        problems.Where(problem => problem.Field == field).Select(problem => problem.Text) is var texts && texts.Any() ? string.Join(" ", texts) : null;
+}
+
 /// <summary>A request that cannot be carried out as it stands. Nothing was saved.</summary>
 public sealed class RefusedException(params IReadOnlyList<Problem> problems)
     : Exception(string.Join(" ", problems.Select(problem => problem.Text)))

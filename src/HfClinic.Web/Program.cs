@@ -1,17 +1,30 @@
-using HfClinic.Web;
-using HfClinic.Web.Shell;
-using HfClinic.Web.Ui;
-using MudBlazor.Services;
+using HfClinic.Web.Hosting;
 
-var builder = WebApplication.CreateBuilder(args);
-builder.Services.AddRazorComponents().AddInteractiveServerComponents();
-builder.Services.AddMudServices();
-builder.Services.AddScoped<Keys>();
+var start = StartOptions.Parse(args);
+if (start.Fault is { } fault)
+{
+    await Console.Error.WriteLineAsync(fault);
+    return 2;
+}
 
+var builder = WebApplication.CreateBuilder(start.HostArguments);
+builder.AddClinic(start);
 var app = builder.Build();
-app.UsePageSafety();
-app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
-app.UseAntiforgery();
-app.MapStaticAssets();
-app.MapRazorComponents<App>().AddInteractiveServerRenderMode();
-app.Run();
+try
+{
+    await app.PrepareClinicAsync(start);
+}
+catch (CannotStartException reason)
+{
+    await Console.Error.WriteLineAsync(reason.Message);
+    return 2;
+}
+
+if (start.Command == StartCommand.VerifyAudit)
+{
+    return await app.VerifyAuditAsync();
+}
+
+app.UseClinic();
+await app.RunAsync();
+return 0;

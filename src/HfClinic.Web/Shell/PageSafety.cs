@@ -13,6 +13,8 @@ public static class PageSafety
         var headers = context.Response.Headers;
         headers.ContentSecurityPolicy = Policy;
         headers.XContentTypeOptions = "nosniff";
+        headers.XFrameOptions = "DENY";
+        headers["Permissions-Policy"] = "camera=(), microphone=(), geolocation=()";
         headers["Referrer-Policy"] = "same-origin";
         return next(context);
     });

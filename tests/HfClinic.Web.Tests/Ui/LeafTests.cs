@@ -105,4 +105,10 @@ public class LeafTests : BunitContext
     public void The_caution_is_word_for_word() => Assert.Equal(
         "Decision support for trained staff. The prescriber decides; follow local protocol. Not for emergencies.",
         Render<Caution>().Find("footer").TextContent);
+
+    [Fact]
+    public void Every_printed_page_carries_the_same_caution() => Assert.Contains(
+        $"@bottom-left {{ content: \"{Caution.Text}\"",
+        File.ReadAllText(Path.Combine(AppContext.BaseDirectory, "Files", "clinic.css")),
+        StringComparison.Ordinal);
 }
