@@ -1,3 +1,4 @@
+using HfClinic.Clinical.Sources;
 using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
 using HfClinic.Records.Contacts;
@@ -67,10 +68,12 @@ public static class ClinicRecords
     {
         services.AddSingleton<DailyWeightsQuery>();
         services.AddSingleton<WeightStripQuery>();
+        services.AddSingleton<DailyListQuery>();
         services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
+        services.AddSingleton(_ => SourceTable.Load());
     }
 
     private static void AddPeople(IServiceCollection services)
