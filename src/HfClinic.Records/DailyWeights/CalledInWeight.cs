@@ -52,7 +52,7 @@ public sealed partial record CalledInWeight(Weight Weight, string Typed, WeightU
 
     private static decimal Number(string digits) => decimal.Parse(digits.Replace(',', '.'), NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture);
 
-    [GeneratedRegex(@"^(?<number>[0-9]{1,4}(?:[.,][0-9]{1,2})?)\s*(?:(?<kilograms>kgs?|kilos?|kilograms?)|(?<pounds>lbs?|pounds?))?\.?$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    [GeneratedRegex(@"^(?<number>[0-9]{1,4}(?:\.[0-9]{1,3}|,[0-9]{1,2})?)\s*(?:(?<kilograms>kgs?|kilos?|kilograms?)|(?<pounds>lbs?|pounds?))?\.?$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Plain();
 
     [GeneratedRegex(@"^(?<stone>[0-9]{1,2})\s*(?:st|stones?)\.?(?:\s*(?<rest>[0-9]{1,2}(?:[.,][0-9]{1,2})?)\s*(?:lbs?|pounds?)?\.?)?$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]

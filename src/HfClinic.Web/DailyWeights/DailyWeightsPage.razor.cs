@@ -101,7 +101,7 @@ public sealed partial class DailyWeightsPage(
         {
             // The page was left.
         }
-        catch (Exception reason) when (DatabaseAway.Says(reason))
+        catch (Exception reason) when (DatabaseAway.Is(reason))
         {
             failure = DatabaseAway.WhileReading;
         }

@@ -10,15 +10,15 @@ using Microsoft.AspNetCore.Components;
 namespace HfClinic.Web.DailyWeights;
 
 /// <summary>Takes called-in readings at typing speed. On refusal everything typed stays.</summary>
-public sealed partial class QuickLine(RecordReadings record, ClinicClock clock)
+public sealed partial class QuickLine(RecordReadings record, ClinicClock clock, ILogger<QuickLine> log)
 {
     private static readonly string[] fields =
     [
-        nameof(WhoField), nameof(CalledInLine.Weight), nameof(CalledInLine.Pressure), nameof(TakenReadings.SystolicPressure),
+        "", nameof(WhoField), nameof(CalledInLine.Weight), nameof(CalledInLine.Pressure), nameof(TakenReadings.SystolicPressure),
         nameof(TakenReadings.DiastolicPressure), nameof(CalledInLine.Pulse), nameof(TakenReadings.HeartRate), nameof(CalledInLine.Symptoms),
     ];
 
-    private readonly Saving saving = new();
+    private readonly Saving saving = new(log);
     private CalledInLine line = new();
     private QuickRecorded? result;
     private WhoField who = null!;

@@ -8,10 +8,11 @@ public static class StripDrawing
 {
     /// <param name="raised">The readings that raised an open flag.</param>
     /// <param name="enrolledOn">No weight was expected before.</param>
-    /// <param name="today">The day still running: no weight is missing yet.</param>
-    public static WeightStripData Of(StripContent strip, IReadOnlySet<long> raised, DateOnly enrolledOn, DateOnly today) => new()
+    /// <param name="from">The first day drawn.</param>
+    /// <param name="today">The last day drawn; still running, so that no weight is missing yet.</param>
+    public static WeightStripData Of(StripContent strip, IReadOnlySet<long> raised, DateOnly enrolledOn, DateOnly from, DateOnly today) => new()
     {
-        From = today.AddDays(1 - DailyList.StripDays),
+        From = from,
         To = today,
         ExpectedFrom = enrolledOn,
         ExpectedTo = today.AddDays(-1),

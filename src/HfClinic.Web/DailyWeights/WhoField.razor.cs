@@ -98,7 +98,7 @@ public sealed partial class WhoField(PatientSearch search, ClinicClock clock, Ti
                 (found, at) = (people, people.Count == 1 ? 0 : -1);
             }
         }
-        catch (Exception reason) when (DatabaseAway.Says(reason))
+        catch (Exception reason) when (DatabaseAway.Is(reason))
         {
             // Suggestions are a help only: the form itself says so when it is sent.
             found = [];

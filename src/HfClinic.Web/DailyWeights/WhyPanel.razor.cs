@@ -73,7 +73,7 @@ public sealed partial class WhyPanel(WhyQuery query, MarkFlagsSeen markSeen, Cli
         {
             failure = reason.Message;
         }
-        catch (Exception reason) when (DatabaseAway.Says(reason))
+        catch (Exception reason) when (DatabaseAway.Is(reason))
         {
             failure = DatabaseAway.WhileReading;
         }

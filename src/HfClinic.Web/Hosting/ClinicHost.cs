@@ -58,7 +58,7 @@ public static class ClinicHost
         app.MapStaticAssets().AllowAnonymous();
         app.MapHealth();
         app.MapSignIn();
-        app.MapRazorComponents<App>().AddInteractiveServerRenderMode();
+        app.MapRazorComponents<App>().AddInteractiveServerRenderMode(server => server.ContentSecurityFrameAncestorsPolicy = null);
     }
 
     private static StorageChoice StorageOf(IServiceProvider provider, StartOptions start)
@@ -76,7 +76,7 @@ public static class ClinicHost
     private static void AddSignIn(IServiceCollection services)
     {
         services.AddAuthentication(IdentityConstants.ApplicationScheme).AddIdentityCookies();
-        services.AddScoped<SignInManager<ClinicUser>, ClinicSignIn>();
+        new IdentityBuilder(typeof(ClinicUser), typeof(IdentityRole<Guid>), services).AddSignInManager<ClinicSignIn>();
         services.ConfigureApplicationCookie(cookie =>
         {
             cookie.Cookie.Name = "hfclinic";

@@ -2,60 +2,88 @@ using HfClinic.Records;
 
 namespace HfClinic.Web.Ui;
 
-/// <summary>Saves what one form holds and keeps what went wrong, so that the form can say it and nothing typed is lost.</summary>
-public sealed class Saving
+/// <summary>One form's saving: carries a change out and keeps what stood in its way, so that it can be said beside what was typed.</summary>
+public sealed class Saving(ILogger log)
 {
-    /// <summary>What is wrong with single fields, or with the whole.</summary>
-    public IReadOnlyList<Problem> Problems { get; private set; } = [];
+    private IReadOnlyList<Problem> problems = [];
 
-    /// <summary>Why nothing was saved, where no field is at fault.</summary>
-    public string? Notice { get; private set; }
+    /// <summary>A change is under way; a second one is not begun.</summary>
+    public bool Busy { get; private set; }
 
-    /// <summary>Whether the very same may succeed a moment later.</summary>
-    public bool CanTryAgain { get; private set; }
+    /// <summary>What stood in the way of the whole; null when nothing did.</summary>
+    public string? Failure { get; private set; }
 
-    /// <summary>A second press while the first is under way does nothing.</summary>
-    public bool IsRunning { get; private set; }
+    /// <summary>What somebody else saved meanwhile, where the change names it.</summary>
+    public object? Theirs { get; private set; }
 
-    /// <summary>What to show beside the field, or null.</summary>
-    public string? For(string field) => Problems.MessageFor(field);
+    /// <summary>What is wrong with a field, or null.</summary>
+    public string? For(string field)
+    {
+        var texts = problems.Where(problem => problem.Field == field).Select(problem => problem.Text).ToList();
+        return texts.Count == 0 ? null : string.Join(" ", texts);
+    }
 
-    /// <summary>Runs the change.</summary>
-    /// <returns>Whether it was carried out.</returns>
+    /// <summary>What is wrong with anything but the fields named: for the main field of a form.</summary>
+    public string? ForAllBut(params ReadOnlySpan<string> fields)
+    {
+        var texts = new List<string>();
+        foreach (var problem in problems)
+        {
+            if (!fields.Contains(problem.Field))
+            {
+                texts.Add(problem.Text);
+            }
+        }
+
+        return texts.Count == 0 ? null : string.Join(" ", texts);
+    }
+
+    /// <summary>Says what is wrong before anything is tried.</summary>
+    /// <returns>Whether nothing is.</returns>
+    public bool Check(IReadOnlyList<Problem> found)
+    {
+        (problems, Failure, Theirs) = (found, null, null);
+        return found.Count == 0;
+    }
+
+    /// <summary>Carries the change out.</summary>
+    /// <returns>Whether it is saved; if not, the form stays as it is and says why.</returns>
     public async Task<bool> RunAsync(Func<Task> change)
     {
-        if (IsRunning)
+        if (Busy)
         {
             return false;
         }
 
-        Clear();
-        IsRunning = true;
+        (Busy, problems, Failure, Theirs) = (true, [], null, null);
         try
         {
             await change();
             return true;
         }
-        catch (RefusedException refused)
+        catch (RefusedException refusal)
         {
-            Problems = refused.Problems;
+            problems = refusal.Problems;
+            Failure = For("");
         }
-        catch (Exception reason) when (reason is NotAllowedException or ChangedMeanwhileException or NotFoundException)
+        catch (ChangedMeanwhileException conflict)
         {
-            Notice = reason.Message;
+            (Failure, Theirs) = (conflict.Message, conflict.Theirs);
         }
-        catch (Exception reason) when (DatabaseAway.Says(reason))
+        catch (Exception refusal) when (refusal is NotAllowedException or NotFoundException)
         {
-            (Notice, CanTryAgain) = (DatabaseAway.WhileSaving, true);
+            Failure = refusal.Message;
+        }
+        catch (Exception away) when (DatabaseAway.Is(away))
+        {
+            log.LogError(away, "A change could not be saved: the database did not answer.");
+            Failure = DatabaseAway.WhileSaving;
         }
         finally
         {
-            IsRunning = false;
+            Busy = false;
         }
 
         return false;
     }
-
-    /// <summary>Forgets what went wrong.</summary>
-    public void Clear() => (Problems, Notice, CanTryAgain) = ([], null, false);
 }
