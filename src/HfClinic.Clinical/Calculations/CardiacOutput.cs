@@ -18,13 +18,13 @@ public static class CardiacOutput
     private static readonly Formula Resistance = new(
         "systemic vascular resistance", "dyn·s/cm⁵", 0, "80 × (mean arterial pressure − central venous pressure) / cardiac output", ["haemodynamics-texts"])
     {
-        Caution = "80 is the customary factor; exact conversion would give 79.993. Customary range 800 to 1400.",
+        Caution = "80 is the customary factor; an exact conversion has 79.993. Customary range 800 to 1400.",
     };
 
     private static readonly Formula ResistanceIndex = new(
         "systemic vascular resistance index", "dyn·s·m²/cm⁵", 0, "80 × (mean arterial pressure − central venous pressure) / cardiac index", ["haemodynamics-texts"])
     {
-        Caution = "80 is the customary factor; exact conversion would give 79.993.",
+        Caution = "80 is the customary factor; an exact conversion has 79.993.",
     };
 
     private static readonly Quantity<Length> OutflowDiameter = Quantity.Centimetres("LVOT diameter", 1.4, 3.0);

@@ -9,6 +9,9 @@ namespace HfClinic.Clinical.Calculations;
 /// <param name="Shown">The result, rounded and with its unit; empty when there is none.</param>
 public abstract record Computed(Formula Formula, ImmutableArray<Input> Inputs, string? WhyNot, string Shown)
 {
+    /// <summary>The day of the oldest dated input; null when no input is dated.</summary>
+    public DateOnly? OldestDay => Inputs.Min(input => input.Day);
+
     /// <summary>For the screen: "62.8 mL" or "not computed: no LVOT diameter".</summary>
     public string Text => WhyNot is null ? Shown : $"not computed: {WhyNot}";
 }

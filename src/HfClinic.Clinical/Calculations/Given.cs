@@ -22,8 +22,8 @@ public readonly record struct Given<T>(T? Value, DateOnly? Day = null)
 
     public static implicit operator Given<T>(T? value) => new(value);
 
-    /// <summary>The result of a calculation as the input of another; the reason goes along when there is no result.</summary>
-    public static implicit operator Given<T>(Computed<T> computed) => new(computed.Value) { From = computed };
+    /// <summary>The result of a calculation as the input of another, as old as its oldest input; the reason goes along when there is no result.</summary>
+    public static implicit operator Given<T>(Computed<T> computed) => new(computed.Value, computed.OldestDay) { From = computed };
 
     /// <summary>The same value, marked unusable when it is undated, dated after the day asked for, or older than allowed.</summary>
     /// <param name="days">The oldest age allowed, in days; an age of exactly this many days is allowed.</param>
