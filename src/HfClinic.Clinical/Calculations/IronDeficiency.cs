@@ -9,7 +9,7 @@ public static class IronDeficiency
         "iron deficiency",
         "",
         0,
-        "ferritin below 100 µg/L, or 100 to 299 µg/L with transferrin saturation below 20 %",
+        "ferritin below 100 micrograms/L, or 100 to 299 micrograms/L with transferrin saturation below 20 %",
         ["esc-2021-iron-deficiency"])
     {
         Caution = "Newer papers prefer transferrin saturation below 20 % or iron of 13 µmol/L or less, whatever the ferritin.",
@@ -17,7 +17,7 @@ public static class IronDeficiency
 
     private static readonly Quantity<decimal> Iron = Quantity.Exact("iron", "µmol/L", 0.5, 100);
     private static readonly Quantity<decimal> BindingCapacity = Quantity.Exact("iron-binding capacity", "µmol/L", 10, 150);
-    private static readonly Quantity<decimal> Ferritin = Quantity.Exact("ferritin", "µg/L", 1, 10_000);
+    private static readonly Quantity<decimal> Ferritin = Quantity.Exact("ferritin", "micrograms/L", 1, 10_000);
     private static readonly Quantity<decimal> Percent = Quantity.Exact("transferrin saturation", "%", 1, 100);
 
     /// <summary>Transferrin saturation, percent. Iron 0.5 to 100 µmol/L, capacity 10 to 150 µmol/L and not below the iron.</summary>
@@ -32,8 +32,8 @@ public static class IronDeficiency
     }
 
     /// <summary>
-    /// Whether the definition is met. Ferritin 1 to 10,000 µg/L, saturation 1 to 100 %. Saturation is only needed for a ferritin
-    /// of 100 µg/L and above, below 300.
+    /// Whether the definition is met. Ferritin 1 to 10,000 micrograms/L, saturation 1 to 100 %. Saturation is only needed for a ferritin
+    /// of 100 micrograms/L and above, below 300.
     /// </summary>
     public static Computed<bool> IsMet(Given<decimal> ferritinMicrogramsPerLitre, Given<decimal> transferrinSaturationPercent)
     {

@@ -71,6 +71,10 @@ public class ComputedTests
         Assert.Contains("is outside 25 to 220 beats/min", output.WhyNot);
     }
 
+    [Fact]
+    public void A_minus_is_written_as_a_minus() =>
+        Assert.Equal("heart rate −5 beats/min is outside 25 to 220 beats/min", CardiacOutput.PerMinute(60, -5).WhyNot);
+
     [Theory]
     [InlineData(364, null)]
     [InlineData(365, null)]

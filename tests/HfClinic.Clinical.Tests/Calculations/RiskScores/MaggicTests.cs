@@ -1,4 +1,3 @@
-using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Calculations.RiskScores;
 using HfClinic.Clinical.Values;
 
