@@ -25,6 +25,7 @@ public class EjectionFractionClassTests
     [InlineData("32", "45", "HFimpEF")]
     [InlineData("40", "49", "HFmrEF")]
     [InlineData("40", "50", "HFimpEF")]
+    [InlineData("40", "51", "HFimpEF")]
     [InlineData("41", "55", "HFpEF")]
     [InlineData("40.5", "55", "HFpEF")]
     [InlineData("38", "39", "HFrEF")]
