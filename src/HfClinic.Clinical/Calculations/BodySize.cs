@@ -18,7 +18,7 @@ public static class BodySize
         Method = "Du Bois",
     };
 
-    private static readonly Formula MassIndex = new("BMI", "kg/m²", 1, "weight in kg / (height in m)²", ["common-practice"]);
+    private static readonly Formula MassIndex = new("BMI", "kg/m²", 1, "weight in kg / (height in m)²", ["common-definitions"]);
 
     private static readonly Formula Ideal = new(
         "ideal weight", "kg", 1, "50 (women 45.5) + 2.3 for each inch of height above 60 inches", ["devine-1974"])

@@ -10,10 +10,10 @@ public static class CardiacOutput
         Caution = "An error of the diameter counts twice. Average 3 beats, in atrial fibrillation 5 to 10.",
     };
 
-    private static readonly Formula Output = new("cardiac output", "L/min", 2, "stroke volume in mL × heart rate / 1000", ["common-practice"]);
+    private static readonly Formula Output = new("cardiac output", "L/min", 2, "stroke volume in mL × heart rate / 1000", ["common-definitions"]);
 
     private static readonly Formula Index = new(
-        "cardiac index", "L/min/m²", 2, "cardiac output / body surface area", ["common-practice", "stevenson-perloff-1989"]);
+        "cardiac index", "L/min/m²", 2, "cardiac output / body surface area", ["common-definitions", "stevenson-perloff-1989"]);
 
     private static readonly Formula Resistance = new(
         "systemic vascular resistance", "dyn·s/cm⁵", 0, "80 × (mean arterial pressure − central venous pressure) / cardiac output", ["haemodynamics-texts"])

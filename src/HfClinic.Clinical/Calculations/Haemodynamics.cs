@@ -4,9 +4,9 @@ namespace HfClinic.Clinical.Calculations;
 public static class Haemodynamics
 {
     private static readonly Formula Mean = new(
-        "mean arterial pressure", "mmHg", 0, "(systolic + 2 × diastolic) / 3", ["common-practice"]);
+        "mean arterial pressure", "mmHg", 0, "(systolic + 2 × diastolic) / 3", ["common-definitions"]);
 
-    private static readonly Formula Pulse = new("pulse pressure", "mmHg", 0, "systolic − diastolic", ["common-practice"]);
+    private static readonly Formula Pulse = new("pulse pressure", "mmHg", 0, "systolic − diastolic", ["common-definitions"]);
 
     private static readonly Formula Proportional = new(
         "proportional pulse pressure", "", 2, "(systolic − diastolic) / systolic", ["stevenson-perloff-1989"])

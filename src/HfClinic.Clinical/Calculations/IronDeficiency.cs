@@ -3,7 +3,7 @@ namespace HfClinic.Clinical.Calculations;
 /// <summary>Iron deficiency in heart failure by the ESC definition of 2021.</summary>
 public static class IronDeficiency
 {
-    private static readonly Formula Saturation = new("transferrin saturation", "%", 0, "100 × iron / iron-binding capacity, same unit", ["common-practice"]);
+    private static readonly Formula Saturation = new("transferrin saturation", "%", 0, "100 × iron / iron-binding capacity, same unit", ["common-definitions"]);
 
     private static readonly Formula Definition = new(
         "iron deficiency",
