@@ -101,6 +101,7 @@ public static class ClinicRecords
             .AddDefaultTokenProviders();
         services.AddDataProtection().SetApplicationName("HfClinic").PersistKeysToDbContext<ClinicDb>();
         services.AddScoped<People>();
+        services.AddScoped<ResponsibleNurses>();
         services.AddScoped<SetUpClinic>();
     }
 }

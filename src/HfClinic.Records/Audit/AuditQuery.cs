@@ -1,13 +1,15 @@
 using HfClinic.Records.Chart;
+using HfClinic.Records.Patients;
 using Microsoft.EntityFrameworkCore;
 
 namespace HfClinic.Records.Audit;
 
 /// <summary>What of the record of access is wanted; empty fields do not narrow it.</summary>
 /// <param name="ChangesOnly">Leaves out the openings of charts.</param>
+/// <param name="Patient">Words of the patient's name or clinic number.</param>
 public sealed record AuditRequest(
     DateTime? From = null, DateTime? Until = null, string Person = "", long? PatientId = null, int Skip = 0, int Take = 100,
-    bool ChangesOnly = false);
+    bool ChangesOnly = false, string Patient = "");
 
 /// <summary>A line with the name of the patient it concerns.</summary>
 public sealed record AuditRow(AuditEntry Entry, string? PatientName);
@@ -48,6 +50,11 @@ public sealed class AuditQuery(IDbContextFactory<ClinicDb> databases)
         if (request.PatientId is { } patient)
         {
             entries = entries.Where(entry => entry.PatientId == patient);
+        }
+
+        foreach (var word in SearchFolding.Fold(request.Patient).Split(' ', StringSplitOptions.RemoveEmptyEntries))
+        {
+            entries = entries.Where(entry => db.Patients.Any(patient => patient.Id == entry.PatientId && patient.SearchText.Contains(word)));
         }
 
         if (request.ChangesOnly)

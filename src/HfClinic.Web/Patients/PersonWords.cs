@@ -1,0 +1,38 @@
+using HfClinic.Clinical.Values;
+
+namespace HfClinic.Web.Patients;
+
+/// <summary>A person in a few words.</summary>
+public static class PersonWords
+{
+    /// <summary>"78 years, woman", or what of it is known.</summary>
+    public static string AgeAndSex(DateOnly? birthDate, Sex sex, DateOnly today)
+    {
+        var words = new List<string>();
+        if (birthDate is { } born)
+        {
+            words.Add(Clinical.Values.Wording.Count(Age(born, today), "year", "years"));
+        }
+
+        if (sex != Sex.NotRecorded)
+        {
+            words.Add(sex == Sex.Female ? "woman" : "man");
+        }
+
+        return words.Count == 0 ? Clinical.Values.Wording.Nothing : string.Join(", ", words);
+    }
+
+    /// <summary>Completed years of life; a person born on 29 Feb completes one on 28 Feb in other years.</summary>
+    public static int Age(DateOnly born, DateOnly today)
+    {
+        var years = today.Year - born.Year;
+        return born.AddYears(years) > today ? years - 1 : years;
+    }
+
+    public static string Of(Sex sex) => sex switch
+    {
+        Sex.Female => "woman",
+        Sex.Male => "man",
+        _ => "not recorded",
+    };
+}
