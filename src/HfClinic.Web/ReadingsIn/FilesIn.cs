@@ -85,12 +85,12 @@ public sealed class FilesIn(DataFolder data, ImportLimits limits)
         Discard(job.Look);
     }
 
-    /// <summary>Removes files that an earlier run of the program left behind.</summary>
-    internal void RemoveLeftovers()
+    /// <summary>Removes files that a stopped program left behind a day ago or earlier; younger ones may belong to another one that is running.</summary>
+    public void RemoveLeftovers(DateTime utcNow)
     {
         if (Directory.Exists(Folder))
         {
-            foreach (var file in Directory.EnumerateFiles(Folder, "*.csv"))
+            foreach (var file in Directory.EnumerateFiles(Folder, "*.csv").Where(file => File.GetLastWriteTimeUtc(file) < utcNow.AddDays(-1)))
             {
                 File.Delete(file);
             }

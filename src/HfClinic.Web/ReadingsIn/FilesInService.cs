@@ -12,7 +12,7 @@ public sealed class FilesInService(
 
     protected override Task ExecuteAsync(CancellationToken stoppingToken)
     {
-        files.RemoveLeftovers();
+        files.RemoveLeftovers(time.GetUtcNow().UtcDateTime);
         return Task.WhenAll(ReadInAsync(stoppingToken), SettleAsync(stoppingToken));
     }
 

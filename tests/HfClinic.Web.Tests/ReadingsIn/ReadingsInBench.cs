@@ -11,6 +11,7 @@ using HfClinic.Web.ReadingsIn;
 using Microsoft.Extensions.Configuration;
 using Microsoft.Extensions.DependencyInjection;
 using Microsoft.Extensions.Hosting;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.ReadingsIn;
 

@@ -7,11 +7,14 @@ using HfClinic.Web.ReadingsIn;
 using Microsoft.AspNetCore.Components;
 using Microsoft.AspNetCore.Components.Forms;
 using Microsoft.Extensions.DependencyInjection;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.ReadingsIn;
 
 public class ReadingsInPageTests
 {
+    public ReadingsInPageTests() => BunitContext.DefaultWaitTimeout = TimeSpan.FromSeconds(20);
+
     private const string Good = "clinic number;date;weight;unit\nT-1;2026-03-29 07:00;72,4;kg\nT-1;2026-03-30 07:00;72,6;kg\nT-9;2026-03-30 07:00;80;kg\n";
 
     [Fact]
@@ -27,7 +30,7 @@ public class ReadingsInPageTests
 
         await page.Find(".button-main").ClickAsync();
         var navigation = bench.Page.Services.GetRequiredService<NavigationManager>();
-        page.WaitForAssertion(() => Assert.Matches("/readings-in/[0-9]+$", navigation.Uri), TimeSpan.FromSeconds(20));
+        page.WaitForAssertion(() => Assert.Matches("/readings-in/[0-9]+$", navigation.Uri));
         Assert.Empty(bench.FilesOnDisk);
 
         var id = long.Parse(navigation.Uri.Split('/')[^1], System.Globalization.CultureInfo.InvariantCulture);
@@ -53,7 +56,7 @@ public class ReadingsInPageTests
         await page.Find("#order-MeasuredAt").ChangeAsync(new ChangeEventArgs { Value = nameof(DateOrder.DayFirst) });
         Assert.Contains("the day stands first: 03 Feb 2026", page.Find("#order-MeasuredAt").TextContent);
         await page.Find(".button-main").ClickAsync();
-        page.WaitForAssertion(() => Assert.Matches("/readings-in/[0-9]+$", bench.Page.Services.GetRequiredService<NavigationManager>().Uri), TimeSpan.FromSeconds(20));
+        page.WaitForAssertion(() => Assert.Matches("/readings-in/[0-9]+$", bench.Page.Services.GetRequiredService<NavigationManager>().Uri));
     }
 
     [Fact]
@@ -138,6 +141,19 @@ public class ReadingsInPageTests
         Assert.Equal("1 on record already", report.Find(".sentence a[aria-current]").TextContent);
         var none = bench.Page.Render<ImportReportPage>(with => with.Add(p => p.ImportId, 4711));
         none.WaitForAssertion(() => Assert.Contains("No such report", none.Markup));
+    }
+
+    [Fact]
+    public async Task Files_left_behind_by_a_stopped_program_are_removed_a_day_later()
+    {
+        await using var bench = await ReadingsInBench.StartAsync();
+        var files = bench.Page.Services.GetRequiredService<FilesIn>();
+        using var content = new MemoryStream(System.Text.Encoding.UTF8.GetBytes(Good));
+        var look = await files.ReceiveAsync(content, "a.csv", null, TestContext.Current.CancellationToken);
+        files.RemoveLeftovers(File.GetLastWriteTimeUtc(look.Path).AddHours(23));
+        Assert.Single(bench.FilesOnDisk);
+        files.RemoveLeftovers(File.GetLastWriteTimeUtc(look.Path).AddHours(25));
+        Assert.Empty(bench.FilesOnDisk);
     }
 
     private static void Choose(IRenderedComponent<ReadingsInPage> page, string content) =>
