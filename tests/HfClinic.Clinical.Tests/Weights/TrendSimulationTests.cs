@@ -32,4 +32,19 @@ public class TrendSimulationTests
         Assert.InRange(rules[0].FalseAlarmsPerMonth, 0.21, 0.29);
         Assert.InRange(rules[0].Sensitivity, 0.61, 0.71);
     }
+
+    /// <summary>With one fixed limit the gain score finds more and alarms less than the detector of two limits.</summary>
+    [Fact]
+    public void TheGainScoreBeatsTheDetectorInMostModels()
+    {
+        List<SimulatedRule> pair = [.. SimulatedRule.Gains.Where(rule => rule.Name is SimulatedRule.GainScore or SimulatedRule.Detector)];
+
+        int wins = WeightDataModel.All.Count(model =>
+        {
+            var (rules, _) = TrendSimulation.Try(model, pair, WeightEvent.Decompensation, people: 400, seed: 12);
+            return rules[0].FalseAlarmsPerMonth <= rules[1].FalseAlarmsPerMonth && rules[0].Sensitivity > rules[1].Sensitivity;
+        });
+
+        Assert.True(wins >= 6, $"Only {wins} of {WeightDataModel.All.Count} models.");
+    }
 }

@@ -25,10 +25,13 @@ internal sealed record SimulatedRule(string Name, Func<SimulatedDay[], int, doub
         new("cumulative sum k 0.5 h 5", (days, day, _) => days[day].Trend.RisingAlarm),
         new("above target", (days, day, start) => Excess(days[day], start)),
         new("slope", (days, day, start) => Slope(days[day].Trend, start)),
+        new(GainScore, (days, day, _) => Reads(days[day]) && days[day].Trend.GainScore > 2.4),
         new(Detector, (days, day, start) => Fluid(days[day]) || Excess(days[day], start)),
     ];
 
     public const string PlainGain = "screened: over 2 kg in 3 days";
+
+    public const string GainScore = "gain score > 2.4";
 
     public const string Detector = "detector: fluid score > 2.0 or above target";
 
