@@ -14,6 +14,7 @@ using HfClinic.Web.Ui;
 using Microsoft.AspNetCore.Components;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.Chart;
 
@@ -232,7 +233,7 @@ public class ChartPageTests
         page.WaitForElement("#changes button");
         await page.Button("Show who changed what").ClickAsync();
         page.Says("Patient changed");
-        page.Says("Given name Oda → Odá");
+        page.Says("Given name: Oda → Odá");
     }
 
     [Fact]

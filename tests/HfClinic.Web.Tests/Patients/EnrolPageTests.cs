@@ -4,6 +4,7 @@ using HfClinic.Testing;
 using HfClinic.Web.Patients;
 using HfClinic.Web.Tests.Pages;
 using Microsoft.EntityFrameworkCore;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.Patients;
 

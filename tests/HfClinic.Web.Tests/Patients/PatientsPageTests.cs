@@ -6,6 +6,7 @@ using HfClinic.Web.Patients;
 using HfClinic.Web.Tests.Pages;
 using HfClinic.Web.Ui;
 using Microsoft.AspNetCore.Components;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.Patients;
 

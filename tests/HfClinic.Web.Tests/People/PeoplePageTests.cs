@@ -5,6 +5,7 @@ using HfClinic.Web.Tests.Pages;
 using HfClinic.Web.Ui;
 using Microsoft.AspNetCore.Components;
 using Microsoft.EntityFrameworkCore;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.People;
 

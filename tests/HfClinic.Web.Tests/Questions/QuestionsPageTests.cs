@@ -7,6 +7,7 @@ using HfClinic.Web.Tests.Pages;
 using HfClinic.Web.Ui;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.Questions;
 

@@ -6,6 +6,7 @@ using HfClinic.Web.RecordOfAccess;
 using HfClinic.Web.Tests.Pages;
 using HfClinic.Web.Ui;
 using Microsoft.EntityFrameworkCore;
+using TestContext = Xunit.TestContext;
 
 namespace HfClinic.Web.Tests.RecordOfAccess;
 
@@ -21,7 +22,7 @@ public class RecordOfAccessPageTests
         await pages.Clinic.EnrolAsync(ClinicSteps.Someone with { ClinicNumber = "T-200", FamilyName = "Lorwick" });
         await pages.Clinic.Get<EditPatient>().RunAsync(TestClinic.As(ClinicRole.Coordinator), id, 0, ClinicSteps.Someone with { Phone = "555-0111" }, Cancellation);
         var page = pages.Render<RecordOfAccessPage>();
-        page.Says("Phone 555-0184 → 555-0111");
+        page.Says("Phone: 555-0184 → 555-0111");
         page.Says("Lorwick, Oda");
         await page.TypeAsync("audit-patient", "elsmere");
         await page.TypeAsync("audit-person", "coordinator");
