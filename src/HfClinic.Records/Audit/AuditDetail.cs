@@ -29,9 +29,15 @@ public static partial class AuditDetail
         var isWeight = new[] { before, after }.Any(values => values.GetValueOrDefault("Kind").ValueKind == JsonValueKind.String
             && values["Kind"].GetString() == nameof(ReadingKind.Weight));
         return [.. before.Keys.Concat(after.Keys).Distinct()
-            .Where(key => !NotShown.Contains(key))
+            .Where(key => !NotShown.Contains(key) && !IsTheLinesOwn(key, after, entry.ByName))
             .Select(key => new AuditField(Words(key), Shown(before, key, isWeight, unit), Shown(after, key, isWeight, unit)))];
     }
+
+    /// <summary>Who did it stands at the head of the line already.</summary>
+    private static bool IsTheLinesOwn(string key, Dictionary<string, JsonElement> after, string byName) =>
+        key.EndsWith("ById", StringComparison.Ordinal)
+        || (key.EndsWith("ByName", StringComparison.Ordinal) && after.TryGetValue(key, out var name)
+            && name.ValueKind == JsonValueKind.String && name.GetString() == byName);
 
     private static Dictionary<string, JsonElement> Values(string? json) => json is null
         ? []
