@@ -44,7 +44,8 @@ public sealed record DailyWeightsRequest(
 
 /// <summary>One row of the daily list: a patient and the stored summary.</summary>
 public sealed record DailyWeightRow(
-    long PatientId, string ClinicNumber, string FamilyName, string GivenName, DateOnly? BirthDate, Sex Sex, string? Phone, PatientSummary Summary)
+    long PatientId, string ClinicNumber, string FamilyName, string GivenName, DateOnly? BirthDate, Sex Sex, string? Phone,
+    DateOnly EnrolledOn, PatientSummary Summary)
 {
     public string FullName => $"{FamilyName}, {GivenName}";
 
@@ -67,7 +68,7 @@ public sealed class DailyWeightsQuery(IDbContextFactory<ClinicDb> databases, Cli
             .Skip(request.Skip).Take(request.Take)
             .Select(row => new DailyWeightRow(
                 row.Patient.Id, row.Patient.ClinicNumber, row.Patient.FamilyName, row.Patient.GivenName, row.Patient.BirthDate,
-                row.Patient.Sex, row.Patient.Phone, row.Summary))
+                row.Patient.Sex, row.Patient.Phone, row.Patient.EnrolledOn, row.Summary))
             .ToListAsync(cancellation);
     }
 
