@@ -98,9 +98,6 @@ public static class ChartWords
         _ => Words.Sentence(key.Replace('-', ' ')),
     };
 
-    /// <summary>I to IV.</summary>
-    public static string Nyha(int nyhaClass) => nyhaClass switch { 1 => "I", 2 => "II", 3 => "III", _ => "IV" };
-
     /// <summary>Titles of the published sources of a flag.</summary>
     public static IReadOnlyList<string> SourceTitles(string keys) =>
         [.. keys.Split(' ', StringSplitOptions.RemoveEmptyEntries).Select(key => Sources.Has(key) ? Sources[key].Title : key)];

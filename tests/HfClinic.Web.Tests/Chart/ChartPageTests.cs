@@ -135,7 +135,7 @@ public class ChartPageTests
         page.WaitForElement("#target-weight");
         await page.TypeAsync("target-weight", "many");
         await page.SendAsync("target-weight");
-        Assert.Contains("cannot be read as a weight", page.Problem("target-weight"));
+        Assert.Contains("is not a weight", page.Problem("target-weight"));
         Assert.Equal("many", page.Typed("target-weight"));
         await page.TypeAsync("target-weight", "71.5");
         await page.SendAsync("target-weight");

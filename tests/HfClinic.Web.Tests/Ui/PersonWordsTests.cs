@@ -1,7 +1,7 @@
 using HfClinic.Clinical.Values;
-using HfClinic.Web.Patients;
+using HfClinic.Web.Ui;
 
-namespace HfClinic.Web.Tests.Patients;
+namespace HfClinic.Web.Tests.Ui;
 
 public class PersonWordsTests
 {
