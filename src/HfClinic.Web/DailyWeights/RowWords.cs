@@ -1,6 +1,7 @@
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules.Volume;
 using HfClinic.Clinical.Values;
+using HfClinic.Clinical.Weights;
 using HfClinic.Records.DailyWeights;
 
 namespace HfClinic.Web.DailyWeights;
@@ -48,14 +49,17 @@ public sealed class RowWords(DailyListRow row, DateOnly today, WeightUnit unit, 
             return (null, false);
         }
 
-        if (days == 7 && Met(Loss) is { Magnitude: { } lost })
+        if (days == 7 && Met(Loss) is not null && Lost is { } lost)
         {
-            return (-(int)lost, true);
+            return (lost, true);
         }
 
         var grams = days switch { 1 => Person.Summary.Gain1Day, 3 => Person.Summary.Gain3Days, _ => Person.Summary.Gain7Days };
         return (grams, grams is not null && GainRules[days].Any(rule => Met(rule) is not null));
     }
+
+    /// <summary>The latest weight against the highest of the 7 days before, as the rule about loss measures it.</summary>
+    private int? Lost => WeightSummary.Of(new PatientPicture { AsOf = today, EnrolledOn = Person.EnrolledOn, Weights = [.. row.Strip.Days] }).Loss(7)?.Difference.Grams;
 
     /// <summary>Grams from target, and whether that raised an open flag.</summary>
     public (int? Grams, bool Raised) ToTarget => HasChanges ? (Person.ToTarget, Met(Above) is not null) : (null, false);
@@ -71,6 +75,10 @@ public sealed class RowWords(DailyListRow row, DateOnly today, WeightUnit unit, 
     public string Beside =>
         $"{Or(Person.Summary.LoopDiuretic, "no loop diuretic")} · {Or(Person.Summary.LastContact, "no contact on record")}" +
         (Person.Summary.OpenQuestions > 0 ? $" · {Wording.Count(Person.Summary.OpenQuestions, "open question", "open questions")}" : "");
+
+    /// <summary>"symptoms reported": the names of the rules that could not be read for want of data; empty when all could.</summary>
+    public string CannotTell => string.Join(", ", Person.Summary.NotChecked.Split("; ", StringSplitOptions.RemoveEmptyEntries)
+        .Select(missing => missing.Split(": ")[0].ToLowerInvariant()).Distinct());
 
     private RowFlag? Met(string ruleId) => row.Flags.FirstOrDefault(flag => flag.RuleId == ruleId && flag.IsMet && !(flag.PutOffUntil > today));
 
