@@ -6,7 +6,6 @@ using HfClinic.Testing;
 using HfClinic.Testing.Databases;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
-using Microsoft.Extensions.Time.Testing;
 using Microsoft.Playwright;
 using static Microsoft.Playwright.Assertions;
 
@@ -20,7 +19,7 @@ public class NursesMorningTests(BrowserFixture browser)
     [Theory, BothDatabases]
     public async Task Three_people_are_phoned_and_settled_without_the_mouse(DatabaseEngine engine)
     {
-        await using var app = await ClinicApp.StartAsync(engine, Mornings.ThreeGains, new FakeTimeProvider(TestClinic.UsualStart));
+        await using var app = await ClinicApp.StartAsync(engine, Mornings.ThreeGains, new ShiftedClock(TestClinic.UsualStart));
         await using var window = await browser.OpenAsync(app);
         var page = window.Page;
         await page.SignInAsync(ClinicRole.Nurse);
@@ -75,7 +74,7 @@ public class NursesMorningTests(BrowserFixture browser)
     [InlineData("/no-such-page", ClinicRole.Nurse)]
     public async Task Every_page_is_open_to_everybody_light_dark_and_small(string address, ClinicRole role)
     {
-        await using var app = await ClinicApp.StartAsync(DatabaseEngine.Sqlite, Mornings.ThreeGains, new FakeTimeProvider(TestClinic.UsualStart));
+        await using var app = await ClinicApp.StartAsync(DatabaseEngine.Sqlite, Mornings.ThreeGains, new ShiftedClock(TestClinic.UsualStart));
         foreach (var (size, scheme) in new[] { (WindowSize.Desk, ColorScheme.Light), (WindowSize.Phone, ColorScheme.Dark) })
         {
             await using var window = await browser.OpenAsync(app, size, scheme);

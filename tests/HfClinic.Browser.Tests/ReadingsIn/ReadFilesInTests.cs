@@ -2,7 +2,6 @@ using HfClinic.Browser.Tests.Browser;
 using HfClinic.Records.Access;
 using HfClinic.Testing;
 using HfClinic.Testing.Databases;
-using Microsoft.Extensions.Time.Testing;
 using Microsoft.Playwright;
 using static Microsoft.Playwright.Assertions;
 
@@ -16,7 +15,7 @@ public class ReadFilesInTests(BrowserFixture browser)
     [Theory, BothDatabases]
     public async Task Two_files_are_read_in_and_reported_line_by_line(DatabaseEngine engine)
     {
-        await using var app = await ClinicApp.StartAsync(engine, Templates.Ready, new FakeTimeProvider(EndOfIntake));
+        await using var app = await ClinicApp.StartAsync(engine, Templates.Ready, new ShiftedClock(EndOfIntake));
         await using var window = await browser.OpenAsync(app);
         var page = window.Page;
         await page.SignInAsync(ClinicRole.Nurse);
