@@ -1,3 +1,4 @@
+using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
 using HfClinic.Clinical.Weights;
