@@ -1,0 +1,77 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using HfClinic.Clinical.Medicines;
+using HfClinic.Clinical.Picture;
+using HfClinic.Clinical.Values;
+
+namespace HfClinic.Clinical.Rules.Titration;
+
+/// <summary>One measured value as a limit reads it.</summary>
+public sealed record Measured(LimitMeasure Measure, decimal Value, DateOnly Day, long? Id)
+{
+    private static readonly ImmutableArray<MedicineClass> BaselineClasses =
+        [MedicineClass.AceInhibitor, MedicineClass.Arb, MedicineClass.Arni, MedicineClass.Mra, MedicineClass.Sglt2Inhibitor];
+
+    /// <summary>"potassium 5.3 mmol/L on 12 Mar 2026".</summary>
+    public string Words => $"{Name(Measure)} {Amount(Measure, Value)} on {Wording.Day(Day)}";
+
+    /// <summary>All values up to the picture's day, in order of time.</summary>
+    public static ImmutableArray<Measured> Series(LimitMeasure measure, PatientPicture picture, ClinicProtocol protocol) => measure switch
+    {
+        LimitMeasure.Potassium => Blood(measure, "potassium", picture),
+        LimitMeasure.Creatinine => Blood(measure, "creatinine", picture),
+        LimitMeasure.Egfr => Blood(measure, "egfr", picture),
+        LimitMeasure.CreatinineRise => Rise(picture, protocol),
+        LimitMeasure.SystolicPressure => Vital(measure, ReadingKind.SystolicPressure, picture),
+        _ => Vital(measure, ReadingKind.HeartRate, picture),
+    };
+
+    /// <summary>
+    /// The last creatinine up to the day of the latest step of a RAS inhibitor, MRA or SGLT2 inhibitor, not older than the
+    /// protocol's number of days at that step; null when there is none.
+    /// </summary>
+    public static Measured? Baseline(PatientPicture picture, ClinicProtocol protocol)
+    {
+        var step = TakenMedicine.Steps(picture, BaselineClasses).Cast<DateOnly?>().FirstOrDefault();
+        var before = Blood(LimitMeasure.Creatinine, "creatinine", picture).LastOrDefault(value => value.Day <= step);
+        return before is not null && protocol["baseline.days"].IsMetBy(step!.Value.DayNumber - before.Day.DayNumber) ? before : null;
+    }
+
+    /// <summary>"5.3 mmol/L", "92/min".</summary>
+    public static string Amount(LimitMeasure measure, decimal value) => measure switch
+    {
+        LimitMeasure.Potassium => Say($"{value:0.0#} mmol/L"),
+        LimitMeasure.Creatinine => Say($"{value:0.#} µmol/L"),
+        LimitMeasure.CreatinineRise => Say($"{value:0.#} %"),
+        LimitMeasure.Egfr => Say($"{value:0.#} mL/min/1.73 m²"),
+        LimitMeasure.SystolicPressure => Say($"{value:0} mmHg"),
+        _ => Say($"{value:0}/min"),
+    };
+
+    public static string Name(LimitMeasure measure) => measure switch
+    {
+        LimitMeasure.Potassium => "potassium",
+        LimitMeasure.Creatinine => "creatinine",
+        LimitMeasure.CreatinineRise => "creatinine above baseline by",
+        LimitMeasure.Egfr => "eGFR",
+        LimitMeasure.SystolicPressure => "systolic pressure",
+        _ => "heart rate",
+    };
+
+    private static ImmutableArray<Measured> Rise(PatientPicture picture, ClinicProtocol protocol) =>
+        Baseline(picture, protocol) is not { Value: > 0 } baseline
+            ? []
+            : [.. Blood(LimitMeasure.CreatinineRise, "creatinine", picture)
+                .Where(value => value.Day > baseline.Day)
+                .Select(value => value with { Value = (value.Value - baseline.Value) / baseline.Value * 100 })];
+
+    private static ImmutableArray<Measured> Blood(LimitMeasure measure, string analyte, PatientPicture picture) => [.. picture.BloodTests
+        .Where(test => test.Analyte == analyte && test.Day <= picture.AsOf)
+        .Select(test => new Measured(measure, test.Value, test.Day, test.Id))];
+
+    private static ImmutableArray<Measured> Vital(LimitMeasure measure, ReadingKind kind, PatientPicture picture) => [.. picture.Vitals
+        .Where(vital => vital.Kind == kind && vital.Day <= picture.AsOf)
+        .Select(vital => new Measured(measure, vital.Value, vital.Day, vital.Id))];
+
+    private static string Say(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);
+}
