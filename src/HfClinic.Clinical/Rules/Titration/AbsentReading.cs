@@ -6,15 +6,19 @@ using HfClinic.Clinical.Values;
 namespace HfClinic.Clinical.Rules.Titration;
 
 /// <summary>Reads a pillar of which nothing that counts is taken.</summary>
-internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack? track, PatientPicture picture, ClinicProtocol protocol)
+internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack? track, TitrationFacts facts)
 {
+    private readonly PatientPicture _picture = facts.Picture;
+
+    private readonly ClinicProtocol _protocol = facts.Protocol;
+
     private readonly string _name = TitrationClasses.Words(titration);
 
     public ClassTitration Read(Phenotype phenotype, ImmutableArray<TakenMedicine> uncounted)
     {
         var ways = Classes().Where(one => !IsExcluded(one)).Select(one => new Candidate(one, null, true)).ToList();
         var open = ways
-            .Select(way => (Way: way, Holds: Holds.Now(titration, way, picture, protocol, track)))
+            .Select(way => (Way: way, Holds: Holds.Now(titration, way, facts, track)))
             .Where(way => !way.Holds.Any(hold => hold.Effect == LimitEffect.Bars))
             .OrderBy(way => way.Holds.Length)
             .ToList();
@@ -24,27 +28,27 @@ internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack
         }
 
         var (candidate, holds) = open[0];
-        var tempo = Tempo.OfAbsence(protocol);
+        var tempo = Tempo.OfAbsence(_protocol);
         var since = Since(out var stopped);
-        var clock = Later(since, Holds.LastCleared(titration, candidate, picture, protocol));
+        var clock = Later(since, Holds.LastCleared(titration, candidate, facts, since));
         var reading = new ClassTitration
         {
             Class = titration,
             State = TitrationState.NotCovered,
             Sentence = "",
-            DaysUnchanged = picture.AsOf.DayNumber - since.DayNumber,
+            DaysUnchanged = _picture.AsOf.DayNumber - since.DayNumber,
             DueSince = since.AddDays(tempo.Gap),
             OverdueFrom = clock.AddDays(tempo.Overdue),
             Holds = holds,
             IsSetAside = holds.Any(hold => hold.Effect >= LimitEffect.Review),
-            Missing = Freshness.Missing(titration, picture, protocol),
-            Limit = RecordedLimits.Standing(titration, picture, protocol),
+            Missing = Freshness.Missing(titration, facts),
+            Limit = RecordedLimits.Standing(titration, _picture, _protocol),
             Notes = stopped is { } day && StoppedAfterImprovement(day, phenotype) is { } note ? [note] : [],
-            OneLevelLower = DoseReader.IsLowered(titration, picture),
+            OneLevelLower = DoseReader.IsLowered(titration, _picture),
             SourceKeys = titration == TitrationClass.Sglt2Inhibitor ? ["esc-2023-update", "aha-2022"] : ["esc-2021-text", "aha-2022"],
         };
         var instead = uncounted.IsEmpty ? "" : $" ({Wording.List([.. uncounted.Select(medicine => medicine.Words)])} not counted)";
-        return GapState.Decide(reading, picture, TitrationState.NotCovered, $"none taken since {Wording.Day(since)}{instead}", _name);
+        return GapState.Decide(reading, _picture, TitrationState.NotCovered, $"none taken since {Wording.Day(since)}{instead}", _name);
     }
 
     private ImmutableArray<MedicineClass> Classes() => titration switch
@@ -56,14 +60,14 @@ internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack
     };
 
     private bool IsExcluded(MedicineClass medicineClass) =>
-        picture.NotGiven.Any(entry => entry.On <= picture.AsOf && entry.Classes.Contains(medicineClass));
+        _picture.NotGiven.Any(entry => entry.On <= _picture.AsOf && entry.Classes.Contains(medicineClass));
 
     private ClassTitration NotGiven(List<Candidate> ways)
     {
-        var reasons = picture.NotGiven
-            .Where(entry => entry.On <= picture.AsOf && entry.Classes.Intersect(Classes()).Any())
+        var reasons = _picture.NotGiven
+            .Where(entry => entry.On <= _picture.AsOf && entry.Classes.Intersect(Classes()).Any())
             .Select(entry => $"{NotGivenWords(entry.Because)} on {Wording.Day(entry.On)} ({entry.Reason})");
-        var bars = ways.SelectMany(way => Holds.Now(titration, way, picture, protocol, track)).Where(hold => hold.Effect == LimitEffect.Bars).ToImmutableArray();
+        var bars = ways.SelectMany(way => Holds.Now(titration, way, facts, track)).Where(hold => hold.Effect == LimitEffect.Bars).ToImmutableArray();
         var words = reasons.Concat(bars.Select(bar => bar.Remark)).Distinct().ToList();
         return new()
         {
@@ -85,11 +89,11 @@ internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack
     /// <summary>The first visit, or the day the last medicine of the pillar was stopped.</summary>
     private DateOnly Since(out DateOnly? stopped)
     {
-        stopped = picture.DoseCourses
+        stopped = _picture.DoseCourses
             .Where(course => Formulary.BuiltIn.Read(course.Medicine) is { CoversPillar: true, Class: { } found } && TitrationClasses.Of(found) == titration)
-            .Where(course => course.Until <= picture.AsOf)
+            .Where(course => course.Until <= _picture.AsOf)
             .Max(course => course.Until);
-        return Later(picture.EnrolledOn, stopped);
+        return Later(_picture.EnrolledOn, stopped);
     }
 
     private TitrationNote? StoppedAfterImprovement(DateOnly stopped, Phenotype phenotype)
@@ -99,7 +103,7 @@ internal sealed class AbsentReading(TitrationClass titration, PostDischargeTrack
             return null;
         }
 
-        var improved = picture.EjectionFractions.Where(fraction => fraction.Day <= picture.AsOf)
+        var improved = _picture.EjectionFractions.Where(fraction => fraction.Day <= _picture.AsOf)
             .Reverse().TakeWhile(fraction => Phenotype.Whole(fraction) > 40).Last();
         return stopped < improved.Day
             ? null

@@ -15,7 +15,7 @@ public sealed class BelowTargetAndDue : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-table-8", "aha-2022-table-14", "clinic-default"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Taken is not null).Select(reading => GapAnswer(
             reading, reading is { State: TitrationState.Due, IsOverdue: false }, Urgency.NextVisit));
 }

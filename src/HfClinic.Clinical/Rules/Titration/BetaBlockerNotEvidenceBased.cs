@@ -16,7 +16,7 @@ public sealed class BetaBlockerNotEvidenceBased : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-text", "aha-2022"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Class == TitrationClass.BetaBlocker).Select(reading =>
             reading.Notes.FirstOrDefault(note => note.Kind == TitrationNoteKind.NotEvidenceBased) is { } note
                 ? Fires(reading, Urgency.NextVisit, note.Text, "counted: bisoprolol, carvedilol, metoprolol succinate, nebivolol")

@@ -11,8 +11,7 @@ internal sealed class ClassReading(
     ImmutableArray<TakenMedicine> taken,
     Phenotype? phenotype,
     PostDischargeTrack? track,
-    PatientPicture picture,
-    ClinicProtocol protocol)
+    TitrationFacts facts)
 {
     private static readonly ImmutableArray<TitrationClass> DosedInHfrefOnly =
         [TitrationClass.BetaBlocker, TitrationClass.RasInhibitor, TitrationClass.Mra];
@@ -35,8 +34,8 @@ internal sealed class ClassReading(
 
         var unknownSalt = _counted.FirstOrDefault(medicine => medicine.Match.SaltUnknown);
         return unknownSalt is not null ? SaltUnknown(unknownSalt)
-            : titration == TitrationClass.Ivabradine ? new IvabradineReading(_counted[0], picture, protocol).Read(phenotype)
-            : new DoseReader(titration, _counted, phenotype, track, picture, protocol).Read();
+            : titration == TitrationClass.Ivabradine ? new IvabradineReading(_counted[0], facts).Read(phenotype)
+            : new DoseReader(titration, _counted, phenotype, track, facts).Read();
     }
 
     private ClassTitration ReadAbsent(Phenotype phenotype)
@@ -52,7 +51,7 @@ internal sealed class ClassReading(
             return SaltUnknown(unknown) with { Notes = notes };
         }
 
-        var reading = new AbsentReading(titration, track, picture, protocol).Read(phenotype, taken);
+        var reading = new AbsentReading(titration, track, facts).Read(phenotype, taken);
         return reading with { Notes = [.. notes, .. reading.Notes] };
     }
 

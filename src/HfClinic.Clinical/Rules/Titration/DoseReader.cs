@@ -12,12 +12,15 @@ internal sealed class DoseReader(
     ImmutableArray<TakenMedicine> counted,
     Phenotype phenotype,
     PostDischargeTrack? track,
-    PatientPicture picture,
-    ClinicProtocol protocol)
+    TitrationFacts facts)
 {
+    private readonly PatientPicture _picture = facts.Picture;
+
+    private readonly ClinicProtocol _protocol = facts.Protocol;
+
     private readonly string _name = TitrationClasses.Words(titration);
 
-    private readonly DoseProfile _profile = protocol.DoseProfile();
+    private readonly DoseProfile _profile = facts.Protocol.DoseProfile();
 
     /// <summary>Beta blocker in atrial fibrillation: no benefit shown in that subgroup (ESC 2021 5.3.2), one level lower.</summary>
     public static bool IsLowered(TitrationClass titration, PatientPicture picture) =>
@@ -39,7 +42,7 @@ internal sealed class DoseReader(
             Target = target.Words(medicine.Recorded),
             SourceKeys = target.Figure.SourceKeys,
             Notes = [.. PublishedNotes(medicine), .. Differences(medicine, target)],
-            OneLevelLower = IsLowered(titration, picture),
+            OneLevelLower = IsLowered(titration, _picture),
         };
         return IsLookedFor(medicine) ? Judge(reading, medicine, target, percent, what) : NotLookedFor(reading, percent, what);
     }
@@ -51,7 +54,7 @@ internal sealed class DoseReader(
             return !target.WeightMissing ? reading : reading with
             {
                 State = TitrationState.CheckDue,
-                Missing = [string.Create(CultureInfo.InvariantCulture, $"weight of the last {protocol["carvedilol.weight-days"].Value:0} days")],
+                Missing = [string.Create(CultureInfo.InvariantCulture, $"weight of the last {_protocol["carvedilol.weight-days"].Value:0} days")],
                 Sentence = $"{_name}: check due: the target depends on the weight, and none is recent; {what}",
             };
         }
@@ -66,7 +69,7 @@ internal sealed class DoseReader(
             };
         }
 
-        return GapState.Decide(WithTime(reading, medicine, percent), picture, TitrationState.Due, $"below target: {what}", _name);
+        return GapState.Decide(WithTime(reading, medicine, percent), _picture, TitrationState.Due, $"below target: {what}", _name);
     }
 
     private ClassTitration WithTime(ClassTitration reading, TakenMedicine medicine, decimal percent)
@@ -74,15 +77,15 @@ internal sealed class DoseReader(
         var (recorded, medicineClass) = (medicine.Match.Medicine!.Name, medicine.Match.Class!.Value);
         var candidate = new Candidate(medicineClass, recorded, false);
         var startedLow = medicineClass == MedicineClass.Arni && medicine.IsStart && medicine.Milligrams == medicine.Match.Medicine.Ladder!.Rungs[0].Amount;
-        var tempo = Tempo.Of(medicineClass, startedLow, protocol);
-        var cleared = Holds.LastCleared(titration, candidate, picture, protocol);
-        var holds = Holds.Now(titration, candidate, picture, protocol, track);
+        var tempo = Tempo.Of(medicineClass, startedLow, _protocol);
+        var cleared = Holds.LastCleared(titration, candidate, facts, medicine.Since);
+        var holds = Holds.Now(titration, candidate, facts, track);
         var onTrack = track is not null && PostDischargeTrack.Covers(titration);
-        var fast = PostDischargeTrack.Days(percent, protocol);
+        var fast = PostDischargeTrack.Days(percent, _protocol);
         var (start, gap, overdue) = onTrack
             ? (track!.DischargedOn, fast.Gap, fast.Overdue)
             : (medicine.Since, tempo.Gap, tempo.Overdue);
-        var earliest = medicine.Since.AddDays(onTrack ? (int)protocol["titration.after-discharge.half-days"].Value : tempo.Earliest);
+        var earliest = medicine.Since.AddDays(onTrack ? (int)_protocol["titration.after-discharge.half-days"].Value : tempo.Earliest);
         return reading with
         {
             StepFrom = earliest,
@@ -90,15 +93,15 @@ internal sealed class DoseReader(
             OverdueFrom = Later(start, cleared).AddDays(overdue),
             Holds = holds,
             IsSetAside = holds.Any(hold => hold.Effect >= LimitEffect.Review),
-            Missing = Freshness.Missing(titration, picture, protocol),
-            Limit = RecordedLimits.Standing(titration, picture, protocol),
+            Missing = Freshness.Missing(titration, facts),
+            Limit = RecordedLimits.Standing(titration, _picture, _protocol),
         };
     }
 
     /// <summary>The medicine nearest its target speaks for the class; of hydralazine and nitrate given apart, the one farthest from it.</summary>
     private (TakenMedicine Medicine, TargetDose? Target) Judged()
     {
-        var all = counted.Select(medicine => (Medicine: medicine, Target: TargetDose.Of(medicine.Match.Medicine!, picture, protocol))).ToList();
+        var all = counted.Select(medicine => (Medicine: medicine, Target: TargetDose.Of(medicine.Match.Medicine!, _picture, _protocol))).ToList();
         var withTarget = all.Where(one => one.Target is not null).OrderBy(one => one.Target!.Figure.PercentOf(one.Medicine.Daily)).ToList();
         return withTarget.Count == 0 ? all[0]
             : titration == TitrationClass.HydralazineNitrate ? withTarget[0]
@@ -137,9 +140,9 @@ internal sealed class DoseReader(
 
         if (target.HigherByWeight is { } higher && medicine.Daily < higher.Dose.LowDaily && medicine.Daily >= target.Figure.ReachedDaily)
         {
-            var limit = protocol[higher.ThresholdKey];
+            var limit = _protocol[higher.ThresholdKey];
             yield return TitrationNote.Information(
-                string.Create(CultureInfo.InvariantCulture, $"{DoseWords.Amount(higher.Dose.Low)} {DoseWords.Schedule(higher.Dose.TimesDaily)} may be given: weight {TargetDose.Weight(picture, protocol):0.0} kg, above {limit.Value:0.#} kg"),
+                string.Create(CultureInfo.InvariantCulture, $"{DoseWords.Amount(higher.Dose.Low)} {DoseWords.Schedule(higher.Dose.TimesDaily)} may be given: weight {TargetDose.Weight(_picture, _protocol):0.0} kg, above {limit.Value:0.#} kg"),
                 higher.Dose);
         }
     }
@@ -163,7 +166,7 @@ internal sealed class DoseReader(
         DaysUnchanged = Days(medicine),
     };
 
-    private int Days(TakenMedicine medicine) => picture.AsOf.DayNumber - medicine.Since.DayNumber;
+    private int Days(TakenMedicine medicine) => _picture.AsOf.DayNumber - medicine.Since.DayNumber;
 
     private static string Percent(decimal percent) => string.Create(CultureInfo.InvariantCulture, $"{decimal.Floor(percent):0} %");
 

@@ -7,21 +7,18 @@ namespace HfClinic.Clinical.Rules.Titration;
 /// <summary>What is missing or too old before a gap may be shown.</summary>
 internal static class Freshness
 {
-    private static readonly ImmutableArray<MedicineClass> StepClasses =
-        [MedicineClass.AceInhibitor, MedicineClass.Arb, MedicineClass.Arni, MedicineClass.Mra];
-
     /// <summary>In words; empty when everything needed is there.</summary>
-    public static ImmutableArray<string> Missing(TitrationClass titration, PatientPicture picture, ClinicProtocol protocol) =>
-        [.. GapChecks.For(titration).Where(need => !IsMet(need, picture, protocol)).Select(need => Words(need, picture, protocol))];
+    public static ImmutableArray<string> Missing(TitrationClass titration, TitrationFacts facts) =>
+        [.. GapChecks.For(titration).Where(need => !IsMet(need, facts)).Select(need => Words(need, facts))];
 
-    private static bool IsMet(GapNeed need, PatientPicture picture, ClinicProtocol protocol) => need switch
+    private static bool IsMet(GapNeed need, TitrationFacts facts) => need switch
     {
-        GapNeed.SystolicPressure => MeasuredHolds.Latest(LimitMeasure.SystolicPressure, picture, protocol) is not null,
-        GapNeed.HeartRate => MeasuredHolds.Latest(LimitMeasure.HeartRate, picture, protocol) is not null,
-        GapNeed.Rhythm => picture.Rhythm is not null,
-        GapNeed.WeightOrCongestion => StatusDays(picture).Any(day => protocol["fresh.status-days"].IsMetBy(picture.AsOf.DayNumber - day.DayNumber)),
-        GapNeed.Potassium => LabCounts(LimitMeasure.Potassium, picture, protocol),
-        _ => LabCounts(LimitMeasure.Creatinine, picture, protocol) || LabCounts(LimitMeasure.Egfr, picture, protocol),
+        GapNeed.SystolicPressure => facts.Latest(LimitMeasure.SystolicPressure) is not null,
+        GapNeed.HeartRate => facts.Latest(LimitMeasure.HeartRate) is not null,
+        GapNeed.Rhythm => facts.Picture.Rhythm is not null,
+        GapNeed.WeightOrCongestion => StatusDays(facts.Picture).Any(day => facts.IsFresh(day, "fresh.status-days")),
+        GapNeed.Potassium => LabCounts(LimitMeasure.Potassium, facts),
+        _ => LabCounts(LimitMeasure.Creatinine, facts) || LabCounts(LimitMeasure.Egfr, facts),
     };
 
     private static IEnumerable<DateOnly> StatusDays(PatientPicture picture) => picture.Weights
@@ -30,30 +27,28 @@ internal static class Freshness
         .Where(day => day <= picture.AsOf);
 
     /// <summary>Fresh, and taken long enough after the last step of any RAS inhibitor or MRA.</summary>
-    private static bool LabCounts(LimitMeasure measure, PatientPicture picture, ClinicProtocol protocol) =>
-        MeasuredHolds.Latest(measure, picture, protocol) is { } latest
-        && (LastStep(picture) is not { } step || protocol["fresh.labs-after-step-days"].IsMetBy(latest.Day.DayNumber - step.DayNumber));
+    private static bool LabCounts(LimitMeasure measure, TitrationFacts facts) =>
+        facts.Latest(measure) is { } latest
+        && (facts.LastRasOrMraStep is not { } step || facts.Protocol["fresh.labs-after-step-days"].IsMetBy(latest.Day.DayNumber - step.DayNumber));
 
-    private static DateOnly? LastStep(PatientPicture picture) => TakenMedicine.Steps(picture, StepClasses).Cast<DateOnly?>().FirstOrDefault();
-
-    private static string Words(GapNeed need, PatientPicture picture, ClinicProtocol protocol)
+    private static string Words(GapNeed need, TitrationFacts facts)
     {
-        var (vitals, labs, status) = (protocol["fresh.vitals-days"].Value, protocol["fresh.labs-days"].Value, protocol["fresh.status-days"].Value);
+        var (vitals, labs, status) = (facts.Protocol["fresh.vitals-days"].Value, facts.Protocol["fresh.labs-days"].Value, facts.Protocol["fresh.status-days"].Value);
         return need switch
         {
             GapNeed.SystolicPressure => $"systolic pressure of the last {vitals:0} days",
             GapNeed.HeartRate => $"heart rate of the last {vitals:0} days",
             GapNeed.Rhythm => "rhythm",
             GapNeed.WeightOrCongestion => $"weight or congestion status of the last {status:0} days",
-            GapNeed.Potassium => $"potassium {Lab(picture, protocol, labs)}",
-            _ => $"creatinine or eGFR {Lab(picture, protocol, labs)}",
+            GapNeed.Potassium => $"potassium {Lab(facts, labs)}",
+            _ => $"creatinine or eGFR {Lab(facts, labs)}",
         };
     }
 
-    private static string Lab(PatientPicture picture, ClinicProtocol protocol, decimal days)
+    private static string Lab(TitrationFacts facts, decimal days)
     {
-        var after = LastStep(picture) is { } step
-            ? $", from {Values.Wording.Day(step.AddDays((int)protocol["fresh.labs-after-step-days"].Value))} on"
+        var after = facts.LastRasOrMraStep is { } step
+            ? $", from {Values.Wording.Day(step.AddDays((int)facts.Protocol["fresh.labs-after-step-days"].Value))} on"
             : "";
         return $"of the last {days:0} days{after}";
     }

@@ -15,7 +15,7 @@ public sealed class IvabradineNotInSinusRhythm : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["label-ivabradine", "esc-2021-text"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Class == TitrationClass.Ivabradine).Select(reading =>
             reading.Notes.FirstOrDefault(note => note.Kind == TitrationNoteKind.NotInSinusRhythm) is { } note
                 ? Fires(reading, Urgency.ThisWeek, note.Text, "sinus rhythm")

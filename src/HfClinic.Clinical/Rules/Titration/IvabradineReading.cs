@@ -8,20 +8,24 @@ namespace HfClinic.Clinical.Rules.Titration;
 /// <summary>
 /// Reads ivabradine against its target, a heart rate of 50 to 60 at rest in sinus rhythm. Sources: ivabradine label; ESC 2021, 5.4.3.
 /// </summary>
-internal sealed class IvabradineReading(TakenMedicine medicine, PatientPicture picture, ClinicProtocol protocol)
+internal sealed class IvabradineReading(TakenMedicine medicine, TitrationFacts facts)
 {
+    private readonly PatientPicture _picture = facts.Picture;
+
+    private readonly ClinicProtocol _protocol = facts.Protocol;
+
     private const string Name = "ivabradine";
 
     private readonly string _band = string.Create(
-        CultureInfo.InvariantCulture, $"{protocol["heart-rate.ivabradine-low"].Value:0} to {protocol["heart-rate.ivabradine-high"].Value:0}/min");
+        CultureInfo.InvariantCulture, $"{facts.Protocol["heart-rate.ivabradine-low"].Value:0} to {facts.Protocol["heart-rate.ivabradine-high"].Value:0}/min");
 
     public ClassTitration Read(Phenotype phenotype)
     {
-        var days = picture.AsOf.DayNumber - medicine.Since.DayNumber;
-        var tempo = Tempo.Of(MedicineClass.Ivabradine, false, protocol);
+        var days = _picture.AsOf.DayNumber - medicine.Since.DayNumber;
+        var tempo = Tempo.Of(MedicineClass.Ivabradine, false, _protocol);
         var candidate = new Candidate(MedicineClass.Ivabradine, Name, false);
-        var holds = Holds.Now(TitrationClass.Ivabradine, candidate, picture, protocol, null);
-        var cleared = Holds.LastCleared(TitrationClass.Ivabradine, candidate, picture, protocol);
+        var holds = Holds.Now(TitrationClass.Ivabradine, candidate, facts, null);
+        var cleared = Holds.LastCleared(TitrationClass.Ivabradine, candidate, facts, medicine.Since);
         var what = $"{medicine.Words}, unchanged for {Wording.Days(days)}";
         var reading = new ClassTitration
         {
@@ -36,11 +40,11 @@ internal sealed class IvabradineReading(TakenMedicine medicine, PatientPicture p
             OverdueFrom = (cleared > medicine.Since ? cleared.Value : medicine.Since).AddDays(tempo.Overdue),
             Holds = holds,
             IsSetAside = holds.Any(hold => hold.Effect >= LimitEffect.Review),
-            Missing = Freshness.Missing(TitrationClass.Ivabradine, picture, protocol),
-            Limit = RecordedLimits.Standing(TitrationClass.Ivabradine, picture, protocol),
+            Missing = Freshness.Missing(TitrationClass.Ivabradine, facts),
+            Limit = RecordedLimits.Standing(TitrationClass.Ivabradine, _picture, _protocol),
             SourceKeys = ["label-ivabradine", "esc-2021-text"],
         };
-        if (picture.Rhythm is { What: Rhythm.AtrialFibrillation } rhythm)
+        if (_picture.Rhythm is { What: Rhythm.AtrialFibrillation } rhythm)
         {
             var note = $"{medicine.Words}, and atrial fibrillation on {Wording.Day(rhythm.Day)}: acts only in sinus rhythm";
             return reading with
@@ -56,16 +60,16 @@ internal sealed class IvabradineReading(TakenMedicine medicine, PatientPicture p
             return reading with { State = TitrationState.NotIndicated, Sentence = $"{Name}: {what}; not looked for in {Phenotype.Words(phenotype.Kind)}" };
         }
 
-        var rate = MeasuredHolds.Latest(LimitMeasure.HeartRate, picture, protocol);
-        var high = protocol["heart-rate.ivabradine-high"];
+        var rate = facts.Latest(LimitMeasure.HeartRate);
+        var high = _protocol["heart-rate.ivabradine-high"];
         if (rate is not null && holds.IsEmpty && !high.IsMetBy(rate.Value))
         {
             return reading with { Sentence = $"{Name}: on target: {rate.Words}, within {_band}; {what}" };
         }
 
-        var maximum = medicine.Match.Medicine!.DosesFor(protocol.DoseProfile())!.Maximum!;
+        var maximum = medicine.Match.Medicine!.DosesFor(_protocol.DoseProfile())!.Maximum!;
         return holds.IsEmpty && medicine.Daily >= maximum.LowDaily
             ? reading with { Sentence = $"{Name}: at the highest published dose: {what}" }
-            : GapState.Decide(reading, picture, TitrationState.Due, $"above the target rate: {rate?.Words ?? "heart rate not known"}; {what}", Name);
+            : GapState.Decide(reading, _picture, TitrationState.Due, $"above the target rate: {rate?.Words ?? "heart rate not known"}; {what}", Name);
     }
 }

@@ -17,7 +17,7 @@ public sealed class LimitExpired : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-text"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => reading.IsShort && RecordedLimits.Expired(reading.Class, picture, protocol) is { } limit
             ? Fires(
                 reading,

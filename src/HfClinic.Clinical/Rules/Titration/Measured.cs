@@ -9,33 +9,20 @@ namespace HfClinic.Clinical.Rules.Titration;
 /// <summary>One measured value as a limit reads it.</summary>
 public sealed record Measured(LimitMeasure Measure, decimal Value, DateOnly Day, long? Id)
 {
-    private static readonly ImmutableArray<MedicineClass> BaselineClasses =
-        [MedicineClass.AceInhibitor, MedicineClass.Arb, MedicineClass.Arni, MedicineClass.Mra, MedicineClass.Sglt2Inhibitor];
-
     /// <summary>"potassium 5.3 mmol/L on 12 Mar 2026".</summary>
     public string Words => $"{Name(Measure)} {Amount(Measure, Value)} on {Wording.Day(Day)}";
 
     /// <summary>All values up to the picture's day, in order of time.</summary>
-    public static ImmutableArray<Measured> Series(LimitMeasure measure, PatientPicture picture, ClinicProtocol protocol) => measure switch
+    /// <param name="baseline">What a rise of creatinine is counted from; without it there is none.</param>
+    internal static ImmutableArray<Measured> Series(LimitMeasure measure, PatientPicture picture, Measured? baseline) => measure switch
     {
         LimitMeasure.Potassium => Blood(measure, "potassium", picture),
         LimitMeasure.Creatinine => Blood(measure, "creatinine", picture),
         LimitMeasure.Egfr => Blood(measure, "egfr", picture),
-        LimitMeasure.CreatinineRise => Rise(picture, protocol),
+        LimitMeasure.CreatinineRise => Rise(picture, baseline),
         LimitMeasure.SystolicPressure => Vital(measure, ReadingKind.SystolicPressure, picture),
         _ => Vital(measure, ReadingKind.HeartRate, picture),
     };
-
-    /// <summary>
-    /// The last creatinine up to the day of the latest step of a RAS inhibitor, MRA or SGLT2 inhibitor, not older than the
-    /// protocol's number of days at that step; null when there is none.
-    /// </summary>
-    public static Measured? Baseline(PatientPicture picture, ClinicProtocol protocol)
-    {
-        var step = TakenMedicine.Steps(picture, BaselineClasses).Cast<DateOnly?>().FirstOrDefault();
-        var before = Blood(LimitMeasure.Creatinine, "creatinine", picture).LastOrDefault(value => value.Day <= step);
-        return before is not null && protocol["baseline.days"].IsMetBy(step!.Value.DayNumber - before.Day.DayNumber) ? before : null;
-    }
 
     /// <summary>"5.3 mmol/L", "92/min".</summary>
     public static string Amount(LimitMeasure measure, decimal value) => measure switch
@@ -58,8 +45,8 @@ public sealed record Measured(LimitMeasure Measure, decimal Value, DateOnly Day,
         _ => "heart rate",
     };
 
-    private static ImmutableArray<Measured> Rise(PatientPicture picture, ClinicProtocol protocol) =>
-        Baseline(picture, protocol) is not { Value: > 0 } baseline
+    private static ImmutableArray<Measured> Rise(PatientPicture picture, Measured? baseline) =>
+        baseline is not { Value: > 0 }
             ? []
             : [.. Blood(LimitMeasure.CreatinineRise, "creatinine", picture)
                 .Where(value => value.Day > baseline.Day)

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 
@@ -7,38 +8,34 @@ namespace HfClinic.Clinical.Rules.Titration;
 internal static class MeasuredHolds
 {
     /// <summary>What holds a step of that class now, by values that are fresh enough to count.</summary>
-    public static IEnumerable<HoldReason> Now(Candidate candidate, PatientPicture picture, ClinicProtocol protocol) =>
-        Applicable(candidate, picture, protocol)
-            .Select(limit => (Limit: limit, Value: Latest(limit.Measure, picture, protocol)))
-            .Where(met => met.Value is not null && protocol[met.Limit.ThresholdKey].IsMetBy(met.Value.Value))
+    public static IEnumerable<HoldReason> Now(Candidate candidate, TitrationFacts facts) =>
+        Applicable(candidate, facts)
+            .Select(limit => (Limit: limit, Value: facts.Latest(limit.Measure)))
+            .Where(met => met.Value is not null && facts.Protocol[met.Limit.ThresholdKey].IsMetBy(met.Value.Value))
             .GroupBy(met => met.Limit.Measure)
             .Select(group => group.MaxBy(met => met.Limit.Effect))
-            .Select(met => Reason(met.Limit, met.Value!, protocol));
+            .Select(met => Reason(met.Limit, met.Value!, facts.Protocol));
 
-    /// <summary>The last day on which a value that had met a limit no longer did; null when none ever cleared.</summary>
-    public static DateOnly? LastCleared(Candidate candidate, PatientPicture picture, ClinicProtocol protocol)
+    /// <summary>The last day on which a value that had met a limit no longer did; null when none has cleared since the given day.</summary>
+    public static DateOnly? LastCleared(Candidate candidate, TitrationFacts facts, DateOnly since) => Applicable(candidate, facts)
+        .Select(limit => Cleared(facts.Series(limit.Measure), facts.Protocol[limit.ThresholdKey], since))
+        .Max();
+
+    /// <summary>The day of the value after the last one that met the limit; a value before the given day can still have cleared after it.</summary>
+    private static DateOnly? Cleared(ImmutableArray<Measured> series, Threshold limit, DateOnly since)
     {
-        DateOnly? cleared = null;
-        foreach (var limit in Applicable(candidate, picture, protocol))
+        DateOnly? after = null;
+        for (var at = series.Length - 1; at >= 0 && !(after < since); at--)
         {
-            var wasMet = false;
-            foreach (var value in Measured.Series(limit.Measure, picture, protocol))
+            if (limit.IsMetBy(series[at].Value))
             {
-                var isMet = protocol[limit.ThresholdKey].IsMetBy(value.Value);
-                cleared = wasMet && !isMet && !(value.Day < cleared) ? value.Day : cleared;
-                wasMet = isMet;
+                return after;
             }
+
+            after = series[at].Day;
         }
 
-        return cleared;
-    }
-
-    /// <summary>The latest value, or null when it is missing or too old to count.</summary>
-    public static Measured? Latest(LimitMeasure measure, PatientPicture picture, ClinicProtocol protocol)
-    {
-        var key = measure is LimitMeasure.SystolicPressure or LimitMeasure.HeartRate ? "fresh.vitals-days" : "fresh.labs-days";
-        return Measured.Series(measure, picture, protocol).LastOrDefault() is { } latest
-            && protocol[key].IsMetBy(picture.AsOf.DayNumber - latest.Day.DayNumber) ? latest : null;
+        return null;
     }
 
     /// <summary>"above 5.0 mmol/L".</summary>
@@ -50,9 +47,9 @@ internal static class MeasuredHolds
         _ => "at or below ",
     } + Measured.Amount(measure, threshold.Value);
 
-    private static IEnumerable<ClassLimit> Applicable(Candidate candidate, PatientPicture picture, ClinicProtocol protocol) => ClassLimit.All
-        .Where(limit => limit.IsFor(candidate.Class, candidate.Medicine, candidate.Starting, protocol.DoseProfile()))
-        .Where(limit => limit.Rhythm == LimitRhythm.Any || picture.Rhythm?.What != Rhythm.AtrialFibrillation);
+    private static IEnumerable<ClassLimit> Applicable(Candidate candidate, TitrationFacts facts) => ClassLimit.All
+        .Where(limit => limit.IsFor(candidate.Class, candidate.Medicine, candidate.Starting, facts.Protocol.DoseProfile()))
+        .Where(limit => limit.Rhythm == LimitRhythm.Any || facts.Picture.Rhythm?.What != Rhythm.AtrialFibrillation);
 
     private static HoldReason Reason(ClassLimit limit, Measured value, ClinicProtocol protocol) => new(
         limit.Effect,

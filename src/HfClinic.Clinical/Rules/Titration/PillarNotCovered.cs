@@ -15,7 +15,7 @@ public sealed class PillarNotCovered : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-text", "esc-2023-update", "aha-2022", "clinic-default"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Taken is null).Select(reading => GapAnswer(
             reading,
             reading is { State: TitrationState.NotCovered, IsOverdue: false } && !reading.Has(TitrationNoteKind.StoppedAfterImprovement),

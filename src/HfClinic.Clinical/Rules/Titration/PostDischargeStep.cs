@@ -17,7 +17,7 @@ public sealed class PostDischargeStep : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["strong-hf-2022", "esc-2023-update"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol)
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol)
     {
         if (assessment.Track is not { } track)
         {

@@ -17,16 +17,17 @@ public sealed record PostDischargeTrack(DateOnly DischargedOn, int Day, Immutabl
     private static readonly ImmutableArray<int> VisitWeeks = [1, 2, 3, 6];
 
     /// <summary>The track the patient is on, or null.</summary>
-    public static PostDischargeTrack? Of(PatientPicture picture, ClinicProtocol protocol)
+    internal static PostDischargeTrack? Of(TitrationFacts facts)
     {
+        var picture = facts.Picture;
         if (picture.DischargedFromHospitalOn is not { } discharged || discharged > picture.AsOf)
         {
             return null;
         }
 
         var day = picture.AsOf.DayNumber - discharged.DayNumber;
-        return protocol["titration.after-discharge.days"].IsMetBy(day)
-            ? new(discharged, day, [.. Indicators(discharged, picture, protocol).OfType<HoldReason>()])
+        return facts.Protocol["titration.after-discharge.days"].IsMetBy(day)
+            ? new(discharged, day, [.. Indicators(discharged, facts).OfType<HoldReason>()])
             : null;
     }
 
@@ -46,23 +47,23 @@ public sealed record PostDischargeTrack(DateOnly DischargedOn, int Day, Immutabl
         return (percent is null or < 50 ? (int)protocol["titration.after-discharge.half-days"].Value : full, full);
     }
 
-    private static IEnumerable<HoldReason?> Indicators(DateOnly discharged, PatientPicture picture, ClinicProtocol protocol)
+    private static IEnumerable<HoldReason?> Indicators(DateOnly discharged, TitrationFacts facts)
     {
-        yield return Of(LimitMeasure.Egfr, "egfr.hold", picture, protocol);
-        yield return Of(LimitMeasure.Potassium, "potassium.hold", picture, protocol);
-        yield return Of(LimitMeasure.SystolicPressure, "pressure.hold-after-discharge", picture, protocol);
-        yield return Of(LimitMeasure.HeartRate, "heart-rate.hold", picture, protocol);
-        yield return Peptide(discharged, picture, protocol);
+        yield return Of(LimitMeasure.Egfr, "egfr.hold", facts);
+        yield return Of(LimitMeasure.Potassium, "potassium.hold", facts);
+        yield return Of(LimitMeasure.SystolicPressure, "pressure.hold-after-discharge", facts);
+        yield return Of(LimitMeasure.HeartRate, "heart-rate.hold", facts);
+        yield return Peptide(discharged, facts);
     }
 
-    private static HoldReason? Of(LimitMeasure measure, string key, PatientPicture picture, ClinicProtocol protocol) =>
-        MeasuredHolds.Latest(measure, picture, protocol) is { } latest && protocol[key].IsMetBy(latest.Value)
-            ? new(LimitEffect.Hold, latest.Words, MeasuredHolds.LimitWords(measure, protocol[key]), "safety indicator of the track", latest.Day, latest.Id, Sources)
+    private static HoldReason? Of(LimitMeasure measure, string key, TitrationFacts facts) =>
+        facts.Latest(measure) is { } latest && facts.Protocol[key].IsMetBy(latest.Value)
+            ? new(LimitEffect.Hold, latest.Words, MeasuredHolds.LimitWords(measure, facts.Protocol[key]), "safety indicator of the track", latest.Day, latest.Id, Sources)
             : null;
 
-    private static HoldReason? Peptide(DateOnly discharged, PatientPicture picture, ClinicProtocol protocol)
+    private static HoldReason? Peptide(DateOnly discharged, TitrationFacts facts)
     {
-        var known = picture.BloodTests.Where(test => test.Analyte == "nt-probnp" && test.Day <= picture.AsOf).ToList();
+        var known = facts.Picture.BloodTests.Where(test => test.Analyte == "nt-probnp" && test.Day <= facts.Picture.AsOf).ToList();
         var before = known.LastOrDefault(test => test.Day <= discharged);
         var latest = known.LastOrDefault(test => test.Day > discharged);
         if (before is not { Value: > 0 } || latest is null)
@@ -70,7 +71,7 @@ public sealed record PostDischargeTrack(DateOnly DischargedOn, int Day, Immutabl
             return null;
         }
 
-        var limit = protocol["nt-probnp.rise-after-discharge"];
+        var limit = facts.Protocol["nt-probnp.rise-after-discharge"];
         var rise = (latest.Value - before.Value) / before.Value * 100;
         return limit.IsMetBy(rise)
             ? new(

@@ -17,7 +17,7 @@ public sealed class RegimenNotAtTarget : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["ecdp-2024"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol)
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol)
     {
         if (assessment.Phenotype is not { OnHfrefPathway: true })
         {

@@ -15,7 +15,7 @@ public sealed class SaltNotRecorded : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-text"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => reading.Notes.FirstOrDefault(note => note.Kind == TitrationNoteKind.SaltUnknown) is { } note
             ? Fires(reading, Urgency.NextVisit, note.Text, "the salt decides whether it counts and what its target is")
             : Clear(reading));

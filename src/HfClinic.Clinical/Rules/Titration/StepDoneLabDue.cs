@@ -18,7 +18,7 @@ public sealed class StepDoneLabDue : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["pmj-review", "sps-monitoring", "clinic-default"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Taken is not null).Select(reading => Read(reading, picture, protocol));
 
     private Finding Read(ClassTitration reading, PatientPicture picture, ClinicProtocol protocol)

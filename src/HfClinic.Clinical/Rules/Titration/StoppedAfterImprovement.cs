@@ -15,7 +15,7 @@ public sealed class StoppedAfterImprovement : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-text", "aha-2022"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Where(reading => reading.Taken is null).Select(reading =>
             reading.IsShort && reading.Notes.FirstOrDefault(note => note.Kind == TitrationNoteKind.StoppedAfterImprovement) is { } note
                 ? Fires(reading, Urgency.ThisWeek, note.Text, "HFrEF therapy is continued after improvement")

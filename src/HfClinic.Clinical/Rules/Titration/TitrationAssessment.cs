@@ -16,11 +16,12 @@ public sealed record TitrationAssessment(Phenotype? Phenotype, PostDischargeTrac
     public static TitrationAssessment Of(PatientPicture picture, ClinicProtocol protocol)
     {
         var phenotype = Phenotype.Of(picture);
-        var track = PostDischargeTrack.Of(picture, protocol);
-        var taken = TakenMedicine.Of(picture).ToLookup(medicine => TitrationClasses.Of(medicine.Match.Class!.Value));
+        var facts = new TitrationFacts(picture, protocol);
+        var track = PostDischargeTrack.Of(facts);
+        var taken = facts.Taken.ToLookup(medicine => TitrationClasses.Of(medicine.Match.Class!.Value));
         var classes = TitrationClasses.All
             .Where(titration => TitrationClasses.Pillars.Contains(titration) || taken[titration].Any())
-            .Select(titration => new ClassReading(titration, [.. taken[titration]], phenotype, track, picture, protocol).Read());
+            .Select(titration => new ClassReading(titration, [.. taken[titration]], phenotype, track, facts).Read());
         return new(phenotype, track, [.. classes]);
     }
 

@@ -16,7 +16,7 @@ public sealed class TitrationCheckDue : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["clinic-default"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => reading.State == TitrationState.CheckDue
             ? Fires(reading, Urgency.NextVisit, reading.Sentence, $"needed: {Wording.List(reading.Missing)}")
             : Clear(reading));

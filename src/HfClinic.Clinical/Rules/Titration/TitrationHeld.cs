@@ -14,7 +14,7 @@ public sealed class TitrationHeld : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-supplement", "strong-hf-2022"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => reading.State == TitrationState.Held
             ? Fires(reading, Urgency.ForInformation, reading.Sentence, string.Join("; ", reading.Holds.Select(hold => hold.Limit.Length == 0 ? hold.Remark : hold.Limit)))
             : Clear(reading));

@@ -15,7 +15,7 @@ public sealed class TitrationInformation : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["esc-2021-table-8", "aha-2022-table-14"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => reading.Notes.Where(note => note.Kind == TitrationNoteKind.Information).ToList() is { Count: > 0 } notes
             ? Fires(reading, Urgency.ForInformation, string.Join("; ", notes.Select(note => note.Text)), "information only") with
             {

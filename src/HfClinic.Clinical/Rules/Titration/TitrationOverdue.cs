@@ -15,7 +15,7 @@ public sealed class TitrationOverdue : TitrationRule
 
     public override ImmutableArray<string> SourceKeys { get; } = ["ecdp-2024", "clinic-default"];
 
-    protected override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
+    public override IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol) =>
         assessment.Classes.Select(reading => GapAnswer(
             reading, reading.IsOverdue && !reading.Has(TitrationNoteKind.StoppedAfterImprovement), Urgency.ThisWeek));
 }

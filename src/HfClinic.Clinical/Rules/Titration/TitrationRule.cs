@@ -28,7 +28,8 @@ public abstract class TitrationRule : IRule
     public IEnumerable<Finding> Assess(PatientPicture picture, ClinicProtocol protocol) =>
         Read(TitrationAssessment.Of(picture, protocol), picture, protocol);
 
-    protected abstract IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol);
+    /// <summary>As <see cref="Assess"/>, from an assessment made before of the same picture and protocol.</summary>
+    public abstract IEnumerable<Finding> Read(TitrationAssessment assessment, PatientPicture picture, ClinicProtocol protocol);
 
     /// <summary>Fires; or cannot tell while a check is due or a safety flag sets the class aside; or clear.</summary>
     protected Finding GapAnswer(ClassTitration reading, bool fires, Urgency urgency)
@@ -38,7 +39,7 @@ public abstract class TitrationRule : IRule
             return Fires(reading, reading.OneLevelLower ? urgency - 1 : urgency, reading.Sentence, GapLimit(reading));
         }
 
-        var missing = reading.IsSetAside ? $"set aside while {Wording.List([.. reading.Holds.Select(hold => hold.Words)])}"
+        var missing = reading is { IsSetAside: true, State: TitrationState.Held } ? $"set aside while {Wording.List([.. reading.Holds.Select(hold => hold.Words)])}"
             : reading.State is TitrationState.CheckDue or TitrationState.CannotTell ? Wording.List(reading.Missing)
             : "";
         return missing.Length == 0 ? Clear(reading) : Answer(reading.Class, Outcome.CannotTell) with { Missing = missing };

@@ -78,4 +78,20 @@ public class BelowTargetAndDueTests
         var finding = _rule.About(picture, TitrationClass.BetaBlocker);
         Assert.Equal((Outcome.CannotTell, "set aside while safety flag safety.potassium is open"), (finding.Outcome, finding.Missing));
     }
+
+    /// <summary>
+    /// Shortest intervals: ESC 2021 supplement (second-hand) 14 days; sacubitril/valsartan label 14, after a low start 21; MRA 28, from memory.
+    /// </summary>
+    [Theory]
+    [InlineData("bisoprolol", 2.5, 1, TitrationClass.BetaBlocker, 14)]
+    [InlineData("ramipril", 2.5, 2, TitrationClass.RasInhibitor, 14)]
+    [InlineData("sacubitril/valsartan", 100, 2, TitrationClass.RasInhibitor, 14)]
+    [InlineData("sacubitril/valsartan", 50, 2, TitrationClass.RasInhibitor, 21)]
+    [InlineData("spironolactone", 12.5, 1, TitrationClass.Mra, 28)]
+    public void The_first_day_a_step_could_come(string medicine, decimal milligrams, decimal times, TitrationClass titration, int days) =>
+        Assert.Equal(Today.AddDays(days - 10), Well(30).On(medicine, milligrams, times, -10).Of(titration).StepFrom);
+
+    [Fact]
+    public void Hydralazine_and_nitrate_given_apart_go_by_the_one_farther_from_its_target() => Assert.Equal(
+        50, Well(30).On("hydralazine", 75, 3, -30).On("isosorbide dinitrate", 20, 3, -30).Of(TitrationClass.HydralazineNitrate).Percent);
 }

@@ -148,15 +148,12 @@ public class HoldBoundaryTests
 
     /// <summary>A baseline counts when it is not older than 90 days at the step: a default of this program.</summary>
     [Theory]
-    [InlineData(-189, true)]
-    [InlineData(-190, true)]
-    [InlineData(-191, false)]
-    public void Age_of_a_baseline(int day, bool counts)
-    {
-        var picture = (Short with { BloodTests = [] }).Blood("creatinine", day, 100);
-
-        Assert.Equal(counts, Measured.Baseline(picture, Esc) is not null);
-    }
+    [InlineData(-189, LimitEffect.Review)]
+    [InlineData(-190, LimitEffect.Review)]
+    [InlineData(-191, None)]
+    public void Age_of_a_baseline(int day, LimitEffect effect) => Assert.Equal(
+        effect,
+        Effect(Short.NoBlood().Blood("creatinine", day, 100).Blood("creatinine", -1, 160).Blood("potassium", -1, 4.4m), TitrationClass.RasInhibitor));
 
     /// <summary>Below 90: ESC 2021 supplement (second-hand).</summary>
     [Theory]
