@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
+using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Rules.Titration;
 using HfClinic.Clinical.Rules.Volume;
-using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Sources;
 
 namespace HfClinic.Clinical.Tests.Rules;

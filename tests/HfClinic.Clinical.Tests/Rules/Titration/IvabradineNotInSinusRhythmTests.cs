@@ -2,7 +2,6 @@ using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Rules.Titration;
-using static HfClinic.Clinical.Tests.Pictures;
 using static HfClinic.Clinical.Tests.Rules.Titration.TitrationPictures;
 
 namespace HfClinic.Clinical.Tests.Rules.Titration;

@@ -1,5 +1,4 @@
 using HfClinic.Clinical.Medicines;
-using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Rules.Titration;
 using static HfClinic.Clinical.Tests.Pictures;
