@@ -1,7 +1,10 @@
+using HfClinic.Clinical.Sources;
 using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
+using HfClinic.Records.Chart;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.DailyWeights;
+using HfClinic.Records.Exchange;
 using HfClinic.Records.Flags;
 using HfClinic.Records.Medicines;
 using HfClinic.Records.Patients;
@@ -52,6 +55,7 @@ public static class ClinicRecords
         services.AddSingleton<SetTargetWeight>();
         services.AddSingleton<RecordReadings>();
         services.AddSingleton<DecideReading>();
+        services.AddSingleton<StrikeOutSymptoms>();
         services.AddSingleton<RecordContact>();
         services.AddSingleton<AnswerFlag>();
         services.AddSingleton<PutOffFlag>();
@@ -61,16 +65,23 @@ public static class ClinicRecords
         services.AddSingleton<MedicineCourses>();
         services.AddSingleton<SetPatientThreshold>();
         services.AddSingleton<AuditVerification>();
+        services.TryAddSingleton(new ImportLimits());
+        services.AddSingleton<ImportAftermath>();
+        services.AddSingleton<ImportFile>();
     }
 
     private static void AddQueries(IServiceCollection services)
     {
         services.AddSingleton<DailyWeightsQuery>();
         services.AddSingleton<WeightStripQuery>();
+        services.AddSingleton<DailyListQuery>();
         services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
+        services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<AuditQuery>();
+        services.AddSingleton(_ => SourceTable.Load());
+        services.AddSingleton<ImportReports>();
     }
 
     private static void AddPeople(IServiceCollection services)
@@ -93,6 +104,7 @@ public static class ClinicRecords
             .AddDefaultTokenProviders();
         services.AddDataProtection().SetApplicationName("HfClinic").PersistKeysToDbContext<ClinicDb>();
         services.AddScoped<People>();
+        services.AddScoped<ResponsibleNurses>();
         services.AddScoped<SetUpClinic>();
     }
 }

@@ -1256,7 +1256,7 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
 
                     b.ToTable("EjectionFractions", t =>
                         {
-                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90");
+                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90");
                         });
                 });
 

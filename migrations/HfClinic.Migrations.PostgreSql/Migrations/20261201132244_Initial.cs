@@ -427,7 +427,7 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                 constraints: table =>
                 {
                     table.PrimaryKey("PK_EjectionFractions", x => x.Id);
-                    table.CheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90");
+                    table.CheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90");
                     table.ForeignKey(
                         name: "FK_EjectionFractions_Patients_PatientId",
                         column: x => x.PatientId,

@@ -334,10 +334,16 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     b.Property<DateTime?>("FinishedAt")
                         .HasColumnType("timestamp with time zone");
 
+                    b.Property<DateTime>("HeartbeatAt")
+                        .HasColumnType("timestamp with time zone");
+
                     b.Property<int>("Held")
                         .HasColumnType("integer");
 
                     b.Property<int>("Kind")
+                        .HasColumnType("integer");
+
+                    b.Property<int>("Later")
                         .HasColumnType("integer");
 
                     b.Property<int>("Lines")
@@ -349,11 +355,20 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     b.Property<DateTime>("StartedAt")
                         .HasColumnType("timestamp with time zone");
 
+                    b.Property<int>("State")
+                        .HasColumnType("integer");
+
                     b.HasKey("Id");
 
                     b.HasIndex("StartedAt");
 
-                    b.ToTable("ImportRuns");
+                    b.HasIndex("State")
+                        .HasFilter("\"State\" = 1");
+
+                    b.ToTable("ImportRuns", t =>
+                        {
+                            t.HasCheckConstraint("CK_ImportRuns_State", "\"State\" BETWEEN 1 AND 4");
+                        });
                 });
 
             modelBuilder.Entity("HfClinic.Records.Flags.Flag", b =>
@@ -1253,7 +1268,7 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
 
                     b.ToTable("EjectionFractions", t =>
                         {
-                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90");
+                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90");
                         });
                 });
 

@@ -1221,7 +1221,7 @@ namespace HfClinic.Migrations.Sqlite.Migrations
 
                     b.ToTable("EjectionFractions", t =>
                         {
-                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90");
+                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90");
                         });
                 });
 

@@ -321,10 +321,16 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<DateTime?>("FinishedAt")
                         .HasColumnType("TEXT");
 
+                    b.Property<DateTime>("HeartbeatAt")
+                        .HasColumnType("TEXT");
+
                     b.Property<int>("Held")
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("Kind")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int>("Later")
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("Lines")
@@ -336,11 +342,20 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<DateTime>("StartedAt")
                         .HasColumnType("TEXT");
 
+                    b.Property<int>("State")
+                        .HasColumnType("INTEGER");
+
                     b.HasKey("Id");
 
                     b.HasIndex("StartedAt");
 
-                    b.ToTable("ImportRuns");
+                    b.HasIndex("State")
+                        .HasFilter("\"State\" = 1");
+
+                    b.ToTable("ImportRuns", t =>
+                        {
+                            t.HasCheckConstraint("CK_ImportRuns_State", "\"State\" BETWEEN 1 AND 4");
+                        });
                 });
 
             modelBuilder.Entity("HfClinic.Records.Flags.Flag", b =>
@@ -1218,7 +1233,7 @@ namespace HfClinic.Migrations.Sqlite.Migrations
 
                     b.ToTable("EjectionFractions", t =>
                         {
-                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90");
+                            t.HasCheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90");
                         });
                 });
 

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Sources;
 
@@ -42,7 +43,7 @@ public sealed record Medicine(
     bool CoversPillar,
     SteeredBy SteeredBy,
     string Unit,
-    ImmutableArray<PhenotypeKind> Phenotypes,
+    ImmutableArray<EjectionFractionKind> Phenotypes,
     MedicineCode? Atc,
     MedicineCode? RxNorm,
     ImmutableArray<PublishedDoses> Doses,

@@ -1,25 +1,11 @@
+using System.Globalization;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Values;
 
 namespace HfClinic.Clinical.Picture;
 
-/// <summary>The kind of heart failure by ejection fraction.</summary>
-public enum PhenotypeKind
-{
-    /// <summary>HFrEF: 40 % or less.</summary>
-    Reduced = 1,
-
-    /// <summary>HFmrEF: 41 to 49 %.</summary>
-    MildlyReduced = 2,
-
-    /// <summary>HFpEF: 50 % or more, never reduced before.</summary>
-    Preserved = 3,
-
-    /// <summary>HFimpEF: once reduced, since improved.</summary>
-    Improved = 4,
-}
-
 /// <summary>A prescriber's word on the phenotype, which goes before the numbers (for example an ejection fraction measured in fast atrial fibrillation).</summary>
-public sealed record PhenotypeOverride(PhenotypeKind Kind, string Reason, string By, DateOnly On);
+public sealed record PhenotypeOverride(EjectionFractionKind Kind, string Reason, string By, DateOnly On);
 
 /// <summary>The phenotype read from the history of ejection fractions.</summary>
 /// <param name="Kind">By number, or by the prescriber's word.</param>
@@ -29,12 +15,11 @@ public sealed record PhenotypeOverride(PhenotypeKind Kind, string Reason, string
 /// </param>
 /// <param name="Latest">The ejection fraction it rests on; null when the prescriber set it without one.</param>
 /// <param name="Sentence">Why, in one sentence.</param>
-public sealed record Phenotype(PhenotypeKind Kind, bool OnHfrefPathway, EjectionFraction? Latest, string Sentence)
+public sealed record Phenotype(EjectionFractionKind Kind, bool OnHfrefPathway, EjectionFraction? Latest, string Sentence)
 {
     /// <summary>
-    /// Reads the picture; null when there is no ejection fraction and no word of a prescriber. Definitions: ESC 2021 and the
-    /// universal definition of 2021 (HFimpEF: 40 % or less, then a rise of 10 points or more to above 40 %; from memory).
-    /// Fractions are rounded to whole numbers, halves up, before they are compared: 40.5 % is 41 %.
+    /// Reads the picture; null when there is no ejection fraction that can be used and no word of a prescriber. The lowest one up to
+    /// the picture's day is the baseline of <see cref="EjectionFractionClass"/>.
     /// </summary>
     public static Phenotype? Of(PatientPicture picture)
     {
@@ -44,42 +29,26 @@ public sealed record Phenotype(PhenotypeKind Kind, bool OnHfrefPathway, Ejection
         {
             return new(
                 word.Kind,
-                word.Kind is PhenotypeKind.Reduced or PhenotypeKind.Improved,
+                word.Kind is EjectionFractionKind.Reduced or EjectionFractionKind.Improved,
                 latest,
                 $"{Words(word.Kind)}, set by {word.By} on {Wording.Day(word.On)}: {word.Reason}");
         }
 
-        if (latest is null)
+        var lowest = seen.MinBy(Whole);
+        if (latest is null || lowest is null || EjectionFractionClass.Of(latest.Percent, lowest.Percent).Value is not { } kind)
         {
             return null;
         }
 
-        var lowest = seen.MinBy(Whole)!;
-        var kind = KindOf(Whole(latest), Whole(lowest));
         var because = Whole(lowest) <= 40 && Whole(latest) > 40 ? $", {Number(lowest)} on {Wording.Day(lowest.Day)}" : "";
         return new(kind, Whole(lowest) <= 40, latest, $"{Words(kind)}: LVEF {Number(latest)} on {Wording.Day(latest.Day)}{because}");
     }
 
-    /// <summary>"HFrEF", "HFmrEF", "HFpEF" or "HFimpEF".</summary>
-    public static string Words(PhenotypeKind kind) => kind switch
-    {
-        PhenotypeKind.Reduced => "HFrEF",
-        PhenotypeKind.MildlyReduced => "HFmrEF",
-        PhenotypeKind.Preserved => "HFpEF",
-        _ => "HFimpEF",
-    };
-
     /// <summary>The ejection fraction as a whole number, halves up.</summary>
-    public static int Whole(EjectionFraction fraction) => (int)decimal.Floor(fraction.Percent + 0.5m);
+    public static int Whole(EjectionFraction fraction) => EjectionFractionClass.Whole(fraction.Percent);
 
-    private static PhenotypeKind KindOf(int latest, int lowest) => latest switch
-    {
-        <= 40 => PhenotypeKind.Reduced,
-        _ when lowest <= 40 && latest - lowest >= 10 => PhenotypeKind.Improved,
-        <= 49 => PhenotypeKind.MildlyReduced,
-        _ => PhenotypeKind.Preserved,
-    };
+    private static string Words(EjectionFractionKind kind) => EjectionFractionClass.Words(kind);
 
     private static string Number(EjectionFraction fraction) =>
-        string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{fraction.Percent:0.##} %");
+        string.Create(CultureInfo.InvariantCulture, $"{fraction.Percent:0.##} %");
 }

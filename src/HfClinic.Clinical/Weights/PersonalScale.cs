@@ -17,6 +17,7 @@ public struct PersonalScale
     private const int FewestReadings = 14;
     private Scores recent;
     private int days;
+    private int slot;
     private double learnt;
 
     /// <summary>The scale to divide scores by, 0.6 to 2.</summary>
@@ -26,34 +27,32 @@ public struct PersonalScale
     /// <param name="score">The day's standardised innovation, or NaN without an ordinary reading.</param>
     public void EndDay(double score)
     {
-        recent[days % (Oldest + 1)] = Math.Abs(score);
+        recent[slot] = Math.Abs(score);
         if (days % 7 == 0 && days >= Newest + FewestReadings - 1)
         {
             Renew();
         }
 
         days++;
+        slot = slot == Oldest ? 0 : slot + 1;
     }
 
     private void Renew()
     {
+        ReadOnlySpan<double> scores = recent;
         Span<double> window = stackalloc double[Oldest - Newest + 1];
         int count = 0;
         for (int back = Newest; back <= Math.Min(Oldest, days); back++)
         {
-            double score = recent[(days - back) % (Oldest + 1)];
-            if (!double.IsNaN(score))
-            {
-                window[count++] = score;
-            }
+            int at = slot - back;
+            double score = scores[at < 0 ? at + Oldest + 1 : at];
+            window[count] = score;
+            count += double.IsNaN(score) ? 0 : 1;
         }
 
         if (count >= FewestReadings)
         {
-            window = window[..count];
-            window.Sort();
-            double median = (window[(count - 1) / 2] + window[count / 2]) / 2;
-            learnt = Math.Clamp(median / 0.6745, 0.6, 2.0);
+            learnt = Math.Clamp(SampleMedian.Of(window[..count]) / 0.6745, 0.6, 2.0);
         }
     }
 

@@ -41,6 +41,17 @@ public readonly record struct TrendDay
     /// <summary>zF: fluid against the person's own baseline in standard deviations of its usual coming and going.</summary>
     public required double FluidScore { get; init; }
 
+    /// <summary>
+    /// zG: the fluid score plus three tenths of the excess over target, the excess counted in standard deviations of fluid
+    /// and no further than three either way; null without a target.
+    /// </summary>
+    /// <remarks>
+    /// Two views of one gain: the fluid score forgets a slow gain, which the body mass takes up; the excess over target keeps
+    /// it. Added, they tell a gain from scatter better than either with a limit of its own. The excess is cut off so that a
+    /// target long out of date cannot alarm by itself. A choice of this program, found by simulation.
+    /// </remarks>
+    public required double? GainScore { get; init; }
+
     /// <summary>The cumulative sums as reached this day, before any restart.</summary>
     public required Cusum Cusum { get; init; }
 

@@ -9,8 +9,9 @@ namespace HfClinic.Clinical.Weights;
 /// Day by day, M is body mass in kg, D its drift in kg/day and F fluid in kg:
 /// M(t) = M(t−1) + D(t−1) + u, D(t) = D(t−1) + u, F(t) = φ F(t−1) + u, reading = M + F + e. All noise is a fraction of the
 /// reference weight. The daily form: a day without a reading is a day of prediction, and times within a day do not count.
-/// The fractions are choices of this program, to be signed off by the clinic; they are set so that one-day differences
-/// spread 0.6% of weight and 14-day changes 1.1 kg (Zhang et al., Eur J Heart Fail 2009;11:420, patients without worsening).
+/// The fractions are choices of this program, to be signed off by the clinic. They give one weighing a scatter near 0.6% of
+/// weight and 14-day changes a spread near 1.1 kg, as in patients without worsening (Zhang et al., Eur J Heart Fail
+/// 2009;11:420, read in a summary).
 /// </remarks>
 public sealed record TrendModel
 {

@@ -58,6 +58,7 @@ public struct TrendState
         double used = scale.Value;
         var (use, score) = grams is int weighed ? Take(model, weighed / 1000.0, used) : (DayUse.None, double.NaN);
         NoteReading(grams is not null);
+        double fluidScore = fluid.Fluid / (used * Math.Sqrt(Math.Max(model.FluidVariance - fluid.FluidVariance, 0.04 * model.FluidVariance)));
         var day = new TrendDay
         {
             Use = use,
@@ -67,7 +68,8 @@ public struct TrendState
             State = fluid,
             Trend = slope,
             Scale = used,
-            FluidScore = fluid.Fluid / (used * Math.Sqrt(Math.Max(model.FluidVariance - fluid.FluidVariance, 0.04 * model.FluidVariance))),
+            FluidScore = fluidScore,
+            GainScore = fluidScore + (0.3 * ClippedExcess(model, target)),
             Cusum = cusum,
             Target = target,
             Learning = !learnt,
@@ -101,6 +103,11 @@ public struct TrendState
         cusum = cusum.Add(Math.Clamp(score / used, -Cusum.LargestScore, Cusum.LargestScore));
         return (DayUse.Reading, score);
     }
+
+    /// <summary>Excess over target in standard deviations of fluid, at most three either way.</summary>
+    private readonly double? ClippedExcess(TrendModel model, double? target) => target is double kilograms
+        ? Math.Clamp((fluid.Expected - kilograms) / Math.Sqrt(model.FluidVariance), -3, 3)
+        : null;
 
     private void NoteReading(bool present)
     {

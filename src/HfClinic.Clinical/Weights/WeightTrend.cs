@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Runtime.InteropServices;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
 
@@ -29,7 +30,7 @@ public static class WeightTrend
         var first = series[0].Day;
         var model = TrendModel.For(Reference(series.AsSpan(), TargetOn(targets, first)));
         var state = TrendState.Start(model);
-        var days = ImmutableArray.CreateBuilder<TrendDay>(through.DayNumber - first.DayNumber + 1);
+        var days = new TrendDay[through.DayNumber - first.DayNumber + 1];
         int next = 0;
         for (var day = first; day <= through; day = day.AddDays(1))
         {
@@ -42,10 +43,10 @@ public static class WeightTrend
             }
 
             int? grams = next < series.Length && series[next].Day == day ? series[next++].Grams : null;
-            days.Add(state.Advance(model, grams, TargetOn(targets, day)?.Grams / 1000.0));
+            days[day.DayNumber - first.DayNumber] = state.Advance(model, grams, TargetOn(targets, day)?.Grams / 1000.0);
         }
 
-        return new TrendHistory(first, days.MoveToImmutable());
+        return new TrendHistory(first, ImmutableCollectionsMarshal.AsImmutableArray(days));
     }
 
     /// <summary>The weight a trend starts at: the target weight, or else the median of the first three weights.</summary>

@@ -55,6 +55,35 @@ public sealed class MedicineCourses(ClinicWork work)
             }
         }, cancellation);
 
+    /// <summary>
+    /// Takes a course out that was recorded in error; it stays visible as struck out. The course it had replaced, if that ended
+    /// on the day this one began, holds on as this one would have.
+    /// </summary>
+    /// <exception cref="ChangedMeanwhileException">It was struck out already.</exception>
+    public Task StrikeOutAsync(Actor actor, long courseId, string reason, CancellationToken cancellation = default) =>
+        work.RunAsync(actor, Capability.ChangeMedicines, async scope =>
+        {
+            var because = TextRules.Required("Reason", "The reason", reason, 400);
+            var patientId = await scope.Db.DoseCourses.Where(c => c.Id == courseId).Select(c => (long?)c.PatientId).SingleOrDefaultAsync(cancellation)
+                ?? throw new NotFoundException("There is no such dose course.");
+            await scope.TakePatientAsync(patientId, cancellation);
+            var course = await scope.Db.DoseCourses.SingleAsync(c => c.Id == courseId, cancellation);
+            if (course.StruckOutAt is not null)
+            {
+                throw new ChangedMeanwhileException("This dose course was struck out meanwhile.");
+            }
+
+            (course.StruckOutAt, course.StruckOutBecause) = (scope.Now, because);
+            var replaced = await scope.Db.DoseCourses
+                .Where(c => c.PatientId == patientId && c.Medicine == course.Medicine && c.Id != courseId
+                    && c.StruckOutAt == null && c.Until == course.From)
+                .OrderByDescending(c => c.Id).FirstOrDefaultAsync(cancellation);
+            if (replaced is not null)
+            {
+                (replaced.Until, replaced.EndedBecause) = (course.Until, course.EndedBecause);
+            }
+        }, cancellation);
+
     private static void CheckDose(PrescribedDose dose, DateOnly from, DateOnly today)
     {
         var problems = new List<Problem>();

@@ -14,7 +14,7 @@ public sealed class EnrolPatient(ClinicWork work)
         work.RunAsync(actor, Capability.EnrolPatients, scope => AddAsync(scope, details, cancellation), cancellation);
 
     /// <summary>The same inside a larger piece of work, such as a roster file.</summary>
-    internal static async Task<long> AddAsync(WorkScope scope, PatientDetails details, CancellationToken cancellation)
+    public static async Task<long> AddAsync(WorkScope scope, PatientDetails details, CancellationToken cancellation)
     {
         var problems = details.Problems(scope.Today).ToList();
         await ClinicNumbers.CheckFreeAsync(scope.Db, problems, details.ClinicNumber, null, cancellation);

@@ -10,6 +10,7 @@ public sealed class Patient
     public const int NameLength = 80;
     public const int ClinicNumberLength = 20;
     public const int PhoneLength = 40;
+    public const int SearchTextLength = 400;
 
     public long Id { get; set; }
 
@@ -65,7 +66,7 @@ internal sealed class PatientMapping : IEntityTypeConfiguration<Patient>
         patient.Property(p => p.ClinicNumber).HasMaxLength(Patient.ClinicNumberLength);
         patient.Property(p => p.FamilyName).HasMaxLength(Patient.NameLength);
         patient.Property(p => p.GivenName).HasMaxLength(Patient.NameLength);
-        patient.Property(p => p.SearchText).HasMaxLength(400);
+        patient.Property(p => p.SearchText).HasMaxLength(Patient.SearchTextLength);
         patient.Property(p => p.Phone).HasMaxLength(Patient.PhoneLength);
         patient.Property(p => p.LeftBecause).HasMaxLength(400);
         patient.Property(p => p.Household).HasMaxLength(40);

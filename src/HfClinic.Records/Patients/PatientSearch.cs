@@ -42,6 +42,14 @@ public sealed class PatientSearch(IDbContextFactory<ClinicDb> databases)
         return await Filtered(db, search, view).CountAsync(cancellation);
     }
 
+    /// <summary>The details as they stand, with the version to save against; null for an unknown number.</summary>
+    public async Task<PatientVersion?> VersionOrNullAsync(long patientId, CancellationToken cancellation = default)
+    {
+        await using var db = await databases.CreateDbContextAsync(cancellation);
+        var patient = await db.Patients.AsNoTracking().SingleOrDefaultAsync(p => p.Id == patientId, cancellation);
+        return patient is null ? null : new PatientVersion(patient.Version, PatientDetails.Of(patient));
+    }
+
     private static IQueryable<Patient> Filtered(ClinicDb db, string search, PatientsView view)
     {
         var patients = db.Patients.AsNoTracking();

@@ -39,10 +39,14 @@ public static class SearchFolding
         return folded.ToString();
     }
 
-    /// <summary>What is stored for a patient: name in both orders, and the number with and without its separators.</summary>
+    /// <summary>What is stored for a patient: name in both orders, and the names and the number also without their separators ("obrien").</summary>
     public static string ForPatient(string familyName, string givenName, string clinicNumber)
     {
-        var number = Fold(clinicNumber);
-        return $"{Fold(familyName)} {Fold(givenName)} {Fold(familyName)} {number} {number.Replace(" ", "", StringComparison.Ordinal)}";
+        var (family, given, number) = (Fold(familyName), Fold(givenName), Fold(clinicNumber));
+        string[] words = [family, given, family, number, .. new[] { number, family, given }.Where(word => word.Contains(' ')).Select(Joined)];
+        var text = string.Join(' ', words);
+        return text.Length <= Patient.SearchTextLength ? text : text[..Patient.SearchTextLength];
     }
+
+    private static string Joined(string words) => words.Replace(" ", "", StringComparison.Ordinal);
 }

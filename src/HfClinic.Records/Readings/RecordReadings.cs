@@ -60,7 +60,7 @@ public sealed class RecordReadings(ClinicWork work)
 
             var patient = await scope.TakePatientAsync(patientId, cancellation);
             var held = taken.Weight is { } weight
-                ? await WeightScreening.CheckAsync(scope.Db, patient, weight, DateOnly.FromDateTime(taken.LocalTime), cancellation)
+                ? await WeightScreening.CheckAsync(scope, patient, weight, DateOnly.FromDateTime(taken.LocalTime), cancellation)
                 : null;
             var rows = Rows(scope, patientId, taken, held);
             await RefuseDuplicatesAsync(scope.Db, patientId, rows, cancellation);

@@ -40,6 +40,7 @@ internal sealed class EjectionFractionMapping : IEntityTypeConfiguration<Ejectio
         fraction.Property(f => f.Method).HasMaxLength(60);
         fraction.Property(f => f.ByName).HasMaxLength(100);
         fraction.Property(f => f.StruckOutBecause).HasMaxLength(400);
-        fraction.ToTable(t => t.HasCheckConstraint("CK_EjectionFractions_Percent", "\"Percent\" BETWEEN 5 AND 90"));
+        // SQLite keeps decimals as text, and would compare them as text.
+        fraction.ToTable(t => t.HasCheckConstraint("CK_EjectionFractions_Percent", "CAST(\"Percent\" AS REAL) BETWEEN 5 AND 90"));
     }
 }

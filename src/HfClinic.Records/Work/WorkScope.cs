@@ -48,6 +48,25 @@ public sealed class WorkScope(ClinicDb db, Actor actor, ClinicClock clock)
         }
     }
 
+    /// <summary>
+    /// Holds many patients for a bulk entry, without reassessing them: the caller has each reassessed in a later piece of work.
+    /// </summary>
+    /// <returns>Each patient's version, which every piece of work that takes the patient raises.</returns>
+    public async Task<IReadOnlyDictionary<long, int>> HoldPatientsAsync(IReadOnlyCollection<long> patientIds, CancellationToken cancellation)
+    {
+        long[] ids = [.. patientIds.Order()];
+        if (db.Database.IsNpgsql())
+        {
+            await db.Database.ExecuteSqlAsync(
+                $"""SELECT 1 FROM "PatientSummaries" WHERE "PatientId" = ANY({ids}) ORDER BY "PatientId" FOR UPDATE""", cancellation);
+        }
+
+        var held = db.PatientSummaries.Where(summary => ids.Contains(summary.PatientId));
+        await held.ExecuteUpdateAsync(set => set.SetProperty(summary => summary.Version, summary => summary.Version + 1), cancellation);
+        return await held.Select(summary => new { summary.PatientId, summary.Version })
+            .ToDictionaryAsync(summary => summary.PatientId, summary => summary.Version, cancellation);
+    }
+
     /// <summary>Has a patient added in this piece of work reassessed at the end.</summary>
     public void Reassess(long patientId) => touched.Add(patientId);
 

@@ -1,4 +1,5 @@
 using CsCheck;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Picture;
 using static HfClinic.Clinical.Tests.Pictures;
 
@@ -11,22 +12,22 @@ namespace HfClinic.Clinical.Tests.Medicines;
 public class PhenotypeTests
 {
     [Theory]
-    [InlineData(PhenotypeKind.Reduced, true, "40")]
-    [InlineData(PhenotypeKind.Reduced, true, "40.4")]
-    [InlineData(PhenotypeKind.MildlyReduced, false, "40.5")]
-    [InlineData(PhenotypeKind.MildlyReduced, false, "41")]
-    [InlineData(PhenotypeKind.MildlyReduced, false, "49.4")]
-    [InlineData(PhenotypeKind.Preserved, false, "49.5")]
-    [InlineData(PhenotypeKind.Preserved, false, "50")]
-    [InlineData(PhenotypeKind.MildlyReduced, true, "35", "44")]
-    [InlineData(PhenotypeKind.Improved, true, "32", "45")]
-    [InlineData(PhenotypeKind.Improved, true, "40", "50")]
-    [InlineData(PhenotypeKind.Improved, true, "40.4", "49.5")]
-    [InlineData(PhenotypeKind.Reduced, true, "38", "39")]
-    [InlineData(PhenotypeKind.Reduced, true, "60", "30")]
-    [InlineData(PhenotypeKind.Improved, true, "55", "30", "60")]
-    [InlineData(PhenotypeKind.Preserved, false, "45", "60")]
-    public void Below_at_and_above_each_bound(PhenotypeKind kind, bool onPathway, params string[] percents)
+    [InlineData(EjectionFractionKind.Reduced, true, "40")]
+    [InlineData(EjectionFractionKind.Reduced, true, "40.4")]
+    [InlineData(EjectionFractionKind.MildlyReduced, false, "40.5")]
+    [InlineData(EjectionFractionKind.MildlyReduced, false, "41")]
+    [InlineData(EjectionFractionKind.MildlyReduced, false, "49.4")]
+    [InlineData(EjectionFractionKind.Preserved, false, "49.5")]
+    [InlineData(EjectionFractionKind.Preserved, false, "50")]
+    [InlineData(EjectionFractionKind.MildlyReduced, true, "35", "44")]
+    [InlineData(EjectionFractionKind.Improved, true, "32", "45")]
+    [InlineData(EjectionFractionKind.Improved, true, "40", "50")]
+    [InlineData(EjectionFractionKind.Improved, true, "40.4", "49.5")]
+    [InlineData(EjectionFractionKind.Reduced, true, "38", "39")]
+    [InlineData(EjectionFractionKind.Reduced, true, "60", "30")]
+    [InlineData(EjectionFractionKind.Improved, true, "55", "30", "60")]
+    [InlineData(EjectionFractionKind.Preserved, false, "45", "60")]
+    public void Below_at_and_above_each_bound(EjectionFractionKind kind, bool onPathway, params string[] percents)
     {
         var phenotype = Phenotype.Of(AtHome.Ejection(percents))!;
 
@@ -38,7 +39,7 @@ public class PhenotypeTests
         Gen.Int[5, 80].Array[1, 6].Sample(percents =>
         {
             var phenotype = Phenotype.Of(AtHome.Ejection([.. percents.Select(percent => $"{percent}")]))!;
-            return percents.Min() > 40 || phenotype is { OnHfrefPathway: true, Kind: not PhenotypeKind.Preserved };
+            return percents.Min() > 40 || phenotype is { OnHfrefPathway: true, Kind: not EjectionFractionKind.Preserved };
         });
 
     [Fact]
@@ -46,12 +47,12 @@ public class PhenotypeTests
     {
         var picture = AtHome.Ejection("35", "60") with
         {
-            PhenotypeOverride = new(PhenotypeKind.Preserved, "measured in fast atrial fibrillation", "Dr Invented", Today.AddDays(-3)),
+            PhenotypeOverride = new(EjectionFractionKind.Preserved, "measured in fast atrial fibrillation", "Dr Invented", Today.AddDays(-3)),
         };
 
         var phenotype = Phenotype.Of(picture)!;
 
-        Assert.Equal((PhenotypeKind.Preserved, false), (phenotype.Kind, phenotype.OnHfrefPathway));
+        Assert.Equal((EjectionFractionKind.Preserved, false), (phenotype.Kind, phenotype.OnHfrefPathway));
         Assert.Equal("HFpEF, set by Dr Invented on 28 Feb 2026: measured in fast atrial fibrillation", phenotype.Sentence);
     }
 

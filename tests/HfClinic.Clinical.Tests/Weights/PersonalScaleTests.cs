@@ -7,11 +7,11 @@ namespace HfClinic.Clinical.Tests.Weights;
 public class PersonalScaleTests
 {
     [Fact]
-    public void AgreesWithTheDefinition() => Gen.Select(Gen.Int, Gen.Double[0.3, 3], Gen.Double[0, 0.7]).Sample((seed, spread, missing) =>
+    public void AgreesWithTheDefinition() => Gen.Select(Gen.Int, Gen.Double[0.3, 3], Gen.Double[0, 0.7], Gen.Int[0, 8]).Sample((seed, spread, missing, decimals) =>
     {
         var normal = new NormalScores(seed);
         var random = new Random(seed);
-        double[] scores = [.. Enumerable.Range(0, 200).Select(_ => random.NextDouble() < missing ? double.NaN : spread * normal.Next())];
+        double[] scores = [.. Enumerable.Range(0, 200).Select(_ => random.NextDouble() < missing ? double.NaN : Math.Round(spread * normal.Next(), decimals))];
         var scale = new PersonalScale();
         double expected = 1;
         for (int day = 0; day < scores.Length; day++)

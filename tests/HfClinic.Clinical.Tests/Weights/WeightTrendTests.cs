@@ -93,6 +93,21 @@ public class WeightTrendTests
     }
 
     [Fact]
+    public void TheGainScoreAddsThreeTenthsOfTheExcessCutOffAtThree()
+    {
+        // One standard deviation of fluid is 0.009 W = 0.72 kg.
+        var lower = new TargetWeight(2, First.AddDays(10), new Weight(79_000), "test");
+        var far = new TargetWeight(3, First.AddDays(11), new Weight(70_000), "test");
+
+        var history = WeightTrend.Of(Daily([.. Enumerable.Repeat(80_000, 12)]), [Eighty, lower, far], [], First.AddDays(11));
+
+        Assert.Equal(0, history.Days[9].GainScore!.Value, 9);
+        Assert.Equal(0.3 * 1 / 0.72, history.Days[10].GainScore!.Value, 9);
+        Assert.Equal(0.3 * 3, history.Days[11].GainScore!.Value, 9);
+        Assert.Null(WeightTrend.Of(Daily(80_000), [], [], First).Days[0].GainScore);
+    }
+
+    [Fact]
     public void LearningEndsWithTheSeventhWeightInFourteenDays()
     {
         int[] days = [0, 4, 8, 12, 16, 18, 20, 22, 23, 24];

@@ -11,7 +11,7 @@ public class MorningSweepTests
     public async Task Finds_the_silent_once_a_day(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighAsync(patient, PatientsAtHome.Today, 80m);
         var sweep = clinic.Get<MorningSweep>();
         Assert.True(await sweep.RunIfDueAsync(TestContext.Current.CancellationToken));
@@ -30,7 +30,7 @@ public class MorningSweepTests
         await using var clinic = await TestClinic.StartAsync(engine);
         for (var number = 1; number <= 60; number++)
         {
-            await clinic.EnrolAsync($"T-{number}", targetKilograms: null);
+            await clinic.EnrolAtHomeAsync($"T-{number}", targetKilograms: null);
         }
 
         await using var other = await TestClinic.JoinAsync(clinic);

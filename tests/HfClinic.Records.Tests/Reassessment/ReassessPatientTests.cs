@@ -18,7 +18,7 @@ public class ReassessPatientTests
     public async Task A_gain_raises_a_flag_with_its_evidence_and_stands_on_the_summary(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighDailyAsync(patient, 80.0m, 80.1m, 80.0m, 82.2m);
 
         await using var db = clinic.OpenDb();
@@ -35,7 +35,7 @@ public class ReassessPatientTests
     public async Task A_flag_stays_when_the_weight_falls_again_and_says_since_when(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighDailyAsync(patient, 80.0m, 80.1m, 80.0m, 82.2m);
         clinic.Clock.Advance(TimeSpan.FromDays(1));
         await clinic.WeighAsync(patient, PatientsAtHome.Today.AddDays(1), 80.1m);
@@ -52,7 +52,7 @@ public class ReassessPatientTests
     public async Task An_answered_flag_leaves_the_list_and_what_was_shown_stays(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighDailyAsync(patient, 80.0m, 80.1m, 80.0m, 82.2m);
         await using var db = clinic.OpenDb();
         foreach (var open in await db.Flags.Where(f => f.State == FlagState.Open).Select(f => f.Id).ToListAsync(TestContext.Current.CancellationToken))
@@ -71,7 +71,7 @@ public class ReassessPatientTests
     public async Task A_flag_put_off_comes_back_on_its_day(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighDailyAsync(patient, 80.0m, 80.1m, 80.0m, 82.2m);
         await using var db = clinic.OpenDb();
         var flag = await db.Flags.AsNoTracking().SingleAsync(f => f.RuleId == Gain, TestContext.Current.CancellationToken);
@@ -90,17 +90,17 @@ public class ReassessPatientTests
     public async Task A_correction_changes_today_and_keeps_what_was_shown(DatabaseEngine engine)
     {
         await using var clinic = await TestClinic.StartAsync(engine);
-        var patient = await clinic.EnrolAsync();
+        var patient = await clinic.EnrolAtHomeAsync();
         await clinic.WeighAsync(patient, PatientsAtHome.Today.AddDays(-2), 80.0m);
         await clinic.WeighAsync(patient, PatientsAtHome.Today.AddDays(-1), 80.1m);
         var typed = await clinic.WeighAsync(patient, PatientsAtHome.Today, 82.2m);
         await clinic.Get<DecideReading>().CorrectAsync(
-            TestClinic.As(ClinicRole.Nurse), typed.ReadingIds[0], 80_200, "80.2 kg", "read out again on the phone", TestContext.Current.CancellationToken);
+            TestClinic.As(ClinicRole.Nurse), typed, 80_200, "80.2 kg", "read out again on the phone", TestContext.Current.CancellationToken);
 
         await using var db = clinic.OpenDb();
         var rows = await db.Readings.Where(r => r.PatientId == patient).OrderBy(r => r.Id).ToListAsync(TestContext.Current.CancellationToken);
         Assert.Equal(ReadingState.Superseded, rows.Single(r => r.Value == 82_200).State);
-        Assert.Equal(typed.ReadingIds[0], rows.Single(r => r.Value == 80_200).SupersedesId);
+        Assert.Equal(typed, rows.Single(r => r.Value == 80_200).SupersedesId);
         Assert.Equal(80_200, (await db.PatientSummaries.SingleAsync(TestContext.Current.CancellationToken)).LastGrams);
         var flag = await db.Flags.SingleAsync(f => f.RuleId == Gain, TestContext.Current.CancellationToken);
         Assert.Equal(PatientsAtHome.Today, flag.NoLongerMetOn);

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
@@ -42,7 +43,7 @@ internal sealed class ClassReading(
     {
         if (!phenotype.OnHfrefPathway && titration != TitrationClass.Sglt2Inhibitor)
         {
-            return Say(TitrationState.NotIndicated, $"not looked for in {Phenotype.Words(phenotype.Kind)}");
+            return Say(TitrationState.NotIndicated, $"not looked for in {EjectionFractionClass.Words(phenotype.Kind)}");
         }
 
         var notes = taken.Select(NoteOnUncounted).ToImmutableArray();

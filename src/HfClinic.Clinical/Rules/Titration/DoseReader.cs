@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
@@ -101,7 +102,7 @@ internal sealed class DoseReader(
     /// <summary>The medicine nearest its target speaks for the class; of hydralazine and nitrate given apart, the one farthest from it.</summary>
     private (TakenMedicine Medicine, TargetDose? Target) Judged()
     {
-        var all = counted.Select(medicine => (Medicine: medicine, Target: TargetDose.Of(medicine.Match.Medicine!, _picture, _protocol))).ToList();
+        var all = counted.Select(medicine => (Medicine: medicine, Target: TargetDose.Of(medicine.Match.Medicine!, facts))).ToList();
         var withTarget = all.Where(one => one.Target is not null).OrderBy(one => one.Target!.Figure.PercentOf(one.Medicine.Daily)).ToList();
         return withTarget.Count == 0 ? all[0]
             : titration == TitrationClass.HydralazineNitrate ? withTarget[0]
@@ -111,11 +112,11 @@ internal sealed class DoseReader(
     /// <summary>On the HFrEF pathway where the medicine has a target there; else where its phenotypes name the present one.</summary>
     private bool IsLookedFor(TakenMedicine medicine) =>
         medicine.Match.Medicine!.Phenotypes.Contains(phenotype.Kind)
-        || (phenotype.OnHfrefPathway && medicine.Match.Medicine.Phenotypes.Contains(PhenotypeKind.Reduced))
-        || (titration == TitrationClass.Finerenone && phenotype.Kind == PhenotypeKind.Improved);
+        || (phenotype.OnHfrefPathway && medicine.Match.Medicine.Phenotypes.Contains(EjectionFractionKind.Reduced))
+        || (titration == TitrationClass.Finerenone && phenotype.Kind == EjectionFractionKind.Improved);
 
     private ClassTitration NotLookedFor(ClassTitration reading, decimal percent, string what) =>
-        phenotype.Kind == PhenotypeKind.MildlyReduced && ClassReading.IsDosedInHfrefOnly(titration)
+        phenotype.Kind == EjectionFractionKind.MildlyReduced && ClassReading.IsDosedInHfrefOnly(titration)
             ? percent >= 100 ? reading : reading with
             {
                 State = TitrationState.Information,
@@ -125,7 +126,7 @@ internal sealed class DoseReader(
             : reading with
             {
                 State = TitrationState.NotIndicated,
-                Sentence = $"{_name}: {what}; no target dose is looked for in {Phenotype.Words(phenotype.Kind)}",
+                Sentence = $"{_name}: {what}; no target dose is looked for in {EjectionFractionClass.Words(phenotype.Kind)}",
             };
 
     private IEnumerable<TitrationNote> Differences(TakenMedicine medicine, TargetDose target)

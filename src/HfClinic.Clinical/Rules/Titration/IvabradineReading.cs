@@ -1,4 +1,5 @@
 using System.Globalization;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
@@ -57,7 +58,7 @@ internal sealed class IvabradineReading(TakenMedicine medicine, TitrationFacts f
 
         if (!phenotype.OnHfrefPathway)
         {
-            return reading with { State = TitrationState.NotIndicated, Sentence = $"{Name}: {what}; not looked for in {Phenotype.Words(phenotype.Kind)}" };
+            return reading with { State = TitrationState.NotIndicated, Sentence = $"{Name}: {what}; not looked for in {EjectionFractionClass.Words(phenotype.Kind)}" };
         }
 
         var rate = facts.Latest(LimitMeasure.HeartRate);

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using HfClinic.Clinical.Calculations;
 using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
@@ -18,7 +19,7 @@ public sealed record Measured(LimitMeasure Measure, decimal Value, DateOnly Day,
     {
         LimitMeasure.Potassium => Blood(measure, "potassium", picture),
         LimitMeasure.Creatinine => Blood(measure, "creatinine", picture),
-        LimitMeasure.Egfr => Blood(measure, "egfr", picture),
+        LimitMeasure.Egfr => Egfr(picture),
         LimitMeasure.CreatinineRise => Rise(picture, baseline),
         LimitMeasure.SystolicPressure => Vital(measure, ReadingKind.SystolicPressure, picture),
         _ => Vital(measure, ReadingKind.HeartRate, picture),
@@ -51,6 +52,22 @@ public sealed record Measured(LimitMeasure Measure, decimal Value, DateOnly Day,
             : [.. Blood(LimitMeasure.CreatinineRise, "creatinine", picture)
                 .Where(value => value.Day > baseline.Day)
                 .Select(value => value with { Value = (value.Value - baseline.Value) / baseline.Value * 100 })];
+
+    /// <summary>As reported; else from the creatinine of the day by CKD-EPI 2021, where age and sex are known.</summary>
+    private static ImmutableArray<Measured> Egfr(PatientPicture picture)
+    {
+        var reported = Blood(LimitMeasure.Egfr, "egfr", picture);
+        var days = reported.Select(value => value.Day).ToHashSet();
+        var computed = Blood(LimitMeasure.Creatinine, "creatinine", picture)
+            .Where(value => !days.Contains(value.Day))
+            .Select(value => (Value: value, Result: Renal.Egfr(Creatinine.FromMicromolPerLitre(value.Value), AgeOn(value.Day, picture.BirthDate), picture.Sex).Value))
+            .Where(found => found.Result is not null)
+            .Select(found => found.Value with { Measure = LimitMeasure.Egfr, Value = Renal.Whole(found.Result!.Value) });
+        return [.. reported.Concat(computed).OrderBy(value => value.Day)];
+    }
+
+    private static int? AgeOn(DateOnly day, DateOnly? birth) =>
+        birth is not { } born ? null : day.Year - born.Year - (day < born.AddYears(day.Year - born.Year) ? 1 : 0);
 
     private static ImmutableArray<Measured> Blood(LimitMeasure measure, string analyte, PatientPicture picture) => [.. picture.BloodTests
         .Where(test => test.Analyte == analyte && test.Day <= picture.AsOf)

@@ -11,15 +11,16 @@ namespace HfClinic.Clinical.Rules.Titration;
 internal sealed record TargetDose(DoseFigure Figure, DoseProfile From, DoseByWeight? HigherByWeight, bool WeightMissing)
 {
     /// <summary>Null when the medicine has no target dose.</summary>
-    public static TargetDose? Of(Medicine medicine, PatientPicture picture, ClinicProtocol protocol)
+    public static TargetDose? Of(Medicine medicine, TitrationFacts facts)
     {
+        var (picture, protocol) = (facts.Picture, facts.Protocol);
         var profile = protocol.DoseProfile();
         if (medicine.SteeredBy != SteeredBy.Dose || medicine.DosesFor(profile) is not { Target: { } target } doses)
         {
             return null;
         }
 
-        var figure = ByKidney(medicine, picture) ?? target;
+        var figure = ByKidney(medicine, facts) ?? target;
         if (medicine.ByWeight.FirstOrDefault(entry => entry.Profile == profile) is not { } byWeight)
         {
             return new(figure, doses.Profile, null, false);
@@ -47,11 +48,16 @@ internal sealed record TargetDose(DoseFigure Figure, DoseProfile From, DoseByWei
             : null;
 
     /// <summary>By the eGFR at the start; by the first one after it when there is none before.</summary>
-    private static DoseFigure? ByKidney(Medicine medicine, PatientPicture picture)
+    private static DoseFigure? ByKidney(Medicine medicine, TitrationFacts facts)
     {
-        var start = picture.DoseCourses.Where(course => Formulary.BuiltIn.Read(course.Medicine).Medicine == medicine).Select(course => course.From).FirstOrDefault();
-        var known = picture.BloodTests.Where(test => test.Analyte == "egfr" && test.Day <= picture.AsOf).ToList();
-        var egfr = (known.LastOrDefault(test => test.Day <= start) ?? known.FirstOrDefault())?.Value;
+        if (medicine.ByKidney.IsEmpty)
+        {
+            return null;
+        }
+
+        var start = facts.Picture.DoseCourses.Where(course => Formulary.BuiltIn.Read(course.Medicine).Medicine == medicine).Select(course => course.From).FirstOrDefault();
+        var known = facts.Series(LimitMeasure.Egfr);
+        var egfr = (known.LastOrDefault(value => value.Day <= start) ?? known.FirstOrDefault())?.Value;
         return medicine.ByKidney.FirstOrDefault(entry => egfr >= entry.From && (entry.Below is null || egfr < entry.Below))?.Target;
     }
 }

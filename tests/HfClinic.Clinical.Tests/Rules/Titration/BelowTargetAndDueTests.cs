@@ -94,4 +94,12 @@ public class BelowTargetAndDueTests
     [Fact]
     public void Hydralazine_and_nitrate_given_apart_go_by_the_one_farther_from_its_target() => Assert.Equal(
         50, Well(30).On("hydralazine", 75, 3, -30).On("isosorbide dinitrate", 20, 3, -30).Of(TitrationClass.HydralazineNitrate).Percent);
+
+    /// <summary>Finerenone label: 40 mg from an eGFR of 60 at the start, 20 mg from 25 to below 60 (the latter from memory).</summary>
+    [Theory]
+    [InlineData(59, 100)]
+    [InlineData(60, 50)]
+    [InlineData(61, 50)]
+    public void The_target_of_finerenone_goes_by_the_eGFR_at_its_start(decimal egfr, decimal percent) => Assert.Equal(
+        percent, Well(55).NoBlood().On("finerenone", 20, 1, -30).Blood("egfr", -30, egfr).Of(TitrationClass.Finerenone).Percent);
 }

@@ -223,6 +223,16 @@ public class HoldBoundaryTests
         Assert.Equal(None, Effect(Short with { DecompensatedOn = Today.AddDays(day) }, TitrationClass.RasInhibitor));
     }
 
+    /// <summary>CKD-EPI 2021: a woman of 72 with creatinine 1.5 mg/dL (132.6 µmol/L) has 36.8, a man of 80 with 3.5 mg/dL 16.9.</summary>
+    [Fact]
+    public void Where_no_eGFR_is_reported_it_is_computed_from_the_creatinine()
+    {
+        var woman = (Short.NoBlood() with { BirthDate = Today.AddYears(-72), Sex = Sex.Female }).Blood("creatinine", 0, 132.6m).Blood("potassium", 0, 4.4m);
+
+        Assert.Contains("eGFR 37 mL/min/1.73 m² on 03 Mar 2026", woman.Of(TitrationClass.Mra).Sentence);
+        Assert.True((woman with { Sex = Sex.NotRecorded }).Of(TitrationClass.Mra).Holds.IsEmpty);
+    }
+
     [Fact]
     public void All_reasons_are_told()
     {
