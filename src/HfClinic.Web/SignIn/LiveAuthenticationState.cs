@@ -16,7 +16,17 @@ public sealed class LiveAuthenticationState(
 
     protected override async Task<bool> ValidateAuthenticationStateAsync(AuthenticationState authenticationState, CancellationToken cancellationToken)
     {
-        await using var scope = scopes.CreateAsyncScope();
+        AsyncServiceScope scope;
+        try
+        {
+            scope = scopes.CreateAsyncScope();
+        }
+        catch (ObjectDisposedException)
+        {
+            return false; // The program is stopping, and the page with it.
+        }
+
+        await using var held = scope;
         var users = scope.ServiceProvider.GetRequiredService<UserManager<ClinicUser>>();
         var user = await users.GetUserAsync(authenticationState.User);
         return user is { IsActive: true }

@@ -64,7 +64,7 @@ public class WhyPanelTests : PageTest
     }
 
     [Fact]
-    public async Task A_refusal_stands_beside_its_field_and_keeps_what_was_chosen()
+    public async Task A_message_left_settles_nothing_by_itself()
     {
         var patient = await Clinic.EnrolWithGainAsync();
         var page = OpenPage();
@@ -73,9 +73,24 @@ public class WhyPanelTests : PageTest
         await page.Find("#call-outcome").ChangeAsync("LeftMessage");
         await page.Find(".panel-form").SubmitAsync();
 
+        await using var db = Clinic.OpenDb();
+        page.WaitForAssertion(() => Assert.NotEmpty(db.Contacts.AsNoTracking().ToList()));
+        Assert.Equal(0, await db.Flags.CountAsync(flag => flag.State == FlagState.Answered, Token));
+    }
+
+    [Fact]
+    public async Task A_refusal_stands_beside_its_field_and_keeps_what_was_chosen()
+    {
+        var patient = await Clinic.EnrolWithGainAsync();
+        var page = OpenPage();
+        OpenRow(page, patient);
+        await page.Find("[data-key=c]").ClickAsync();
+        await page.Find("#call-outcome").ChangeAsync("SpokeWithRelative");
+        await page.Find(".panel-form").SubmitAsync();
+
         page.WaitForAssertion(() => Assert.Contains("word on what came of the call", page.Find("#call-note-problem").TextContent, StringComparison.Ordinal));
         Assert.Equal("true", page.Find("#call-note").GetAttribute("aria-invalid"));
-        Assert.Equal("LeftMessage", page.Find("#call-outcome").GetAttribute("value"));
+        Assert.Equal("SpokeWithRelative", page.Find("#call-outcome").GetAttribute("value"));
     }
 
     [Fact]
