@@ -41,6 +41,16 @@ internal static class Pictures
             500, medicine, milligrams, 1, Today.AddDays(from), until is { } day ? Today.AddDays(day) : null)),
     };
 
+    /// <summary>Ejection fractions in percent, 30 days apart, the last one today.</summary>
+    public static PatientPicture Ejection(this PatientPicture picture, params string[] percents) => picture with
+    {
+        EjectionFractions = [.. percents.Select((percent, at) => new EjectionFraction(
+            600 + at,
+            Today.AddDays(-30 * (percents.Length - 1 - at)),
+            decimal.Parse(percent, System.Globalization.CultureInfo.InvariantCulture),
+            "echocardiography"))],
+    };
+
     /// <summary>The one answer of a rule that answers once.</summary>
     public static Finding Read(this IRule rule, PatientPicture picture, ClinicProtocol? protocol = null) =>
         Assert.Single(rule.Assess(picture, protocol ?? Defaults));

@@ -49,6 +49,38 @@ public sealed record PatientPicture
     /// <summary>Rule identifiers of the flags open for this patient before this assessment.</summary>
     public ImmutableHashSet<string> OpenFlagRules { get; init; } = [];
 
+    /// <summary>A prescriber's word on the phenotype; null when the ejection fractions speak for themselves.</summary>
+    public PhenotypeOverride? PhenotypeOverride { get; init; }
+
+    /// <summary>Reasons on record for stopping short of target, in order of day.</summary>
+    public ImmutableArray<TitrationLimit> TitrationLimits { get; init; } = [];
+
+    /// <summary>Documented contraindications, intolerances, allergies and refusals.</summary>
+    public ImmutableArray<NotGiven> NotGiven { get; init; } = [];
+
+    public ImmutableHashSet<PatientCondition> Conditions { get; init; } = [];
+
+    /// <summary>Rhythms as found, in order of day.</summary>
+    public ImmutableArray<Seen<Rhythm>> Rhythms { get; init; } = [];
+
+    /// <summary>New York Heart Association classes, 1 to 4, in order of day.</summary>
+    public ImmutableArray<Seen<int>> NyhaClasses { get; init; } = [];
+
+    /// <summary>Whether signs of congestion were found, in order of day.</summary>
+    public ImmutableArray<Seen<bool>> Congestion { get; init; } = [];
+
+    /// <summary>Whether low pressure was found to cause symptoms, in order of day.</summary>
+    public ImmutableArray<Seen<bool>> SymptomaticHypotension { get; init; } = [];
+
+    /// <summary>The last decompensation other than the admission that ended on <see cref="DischargedFromHospitalOn"/>.</summary>
+    public DateOnly? DecompensatedOn { get; init; }
+
+    /// <summary>Same-day safety flags open before this assessment, by class of medicine.</summary>
+    public ImmutableArray<OpenSafetyFlag> OpenSafetyFlags { get; init; } = [];
+
+    /// <summary>The rhythm last found up to <see cref="AsOf"/>; null when none is on record.</summary>
+    public Seen<Rhythm>? Rhythm => Rhythms.LastOrDefault(seen => seen.Day <= AsOf);
+
     /// <summary>The target weight that holds on <see cref="AsOf"/>, or null when none was set.</summary>
     public TargetWeight? TargetWeight => TargetWeights.LastOrDefault(target => target.From <= AsOf);
 }

@@ -1,6 +1,7 @@
 using System.Collections.Frozen;
 using System.Collections.Immutable;
 using HfClinic.Clinical.Picture;
+using HfClinic.Clinical.Rules.Titration;
 using HfClinic.Clinical.Rules.Volume;
 
 namespace HfClinic.Clinical.Rules;
@@ -35,14 +36,19 @@ public static class RuleBook
     public static ImmutableArray<Finding> Assess(PatientPicture picture, ClinicProtocol protocol) => Assess(All, picture, protocol);
 
     /// <summary>What the given rules say. A rule that fails says so in its own finding; the others are not held up by it.</summary>
-    public static ImmutableArray<Finding> Assess(IEnumerable<IRule> rules, PatientPicture picture, ClinicProtocol protocol) =>
-        [.. rules.SelectMany(rule => Assess(rule, picture, protocol))];
+    public static ImmutableArray<Finding> Assess(IEnumerable<IRule> rules, PatientPicture picture, ClinicProtocol protocol)
+    {
+        var titration = new Lazy<TitrationAssessment>(() => TitrationAssessment.Of(picture, protocol));
+        return [.. rules.SelectMany(rule => Checked(rule, () => rule is TitrationRule one
+            ? one.Read(titration.Value, picture, protocol)
+            : rule.Assess(picture, protocol)))];
+    }
 
-    private static ImmutableArray<Finding> Assess(IRule rule, PatientPicture picture, ClinicProtocol protocol)
+    private static ImmutableArray<Finding> Checked(IRule rule, Func<IEnumerable<Finding>> read)
     {
         try
         {
-            var findings = rule.Assess(picture, protocol).ToImmutableArray();
+            var findings = read().ToImmutableArray();
             var twice = findings.GroupBy(finding => finding.Subject).FirstOrDefault(group => group.Skip(1).Any());
             return twice is null ? findings : [NotChecked(rule, $"it answered twice for '{twice.Key}'")];
         }

@@ -1,3 +1,4 @@
+using HfClinic.Clinical.Medicines;
 using HfClinic.Records.Medicines;
 using Microsoft.EntityFrameworkCore;
 

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using HfClinic.Clinical.Flags;
+using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Values;

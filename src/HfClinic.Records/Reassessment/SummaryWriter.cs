@@ -1,5 +1,6 @@
 using System.Globalization;
 using HfClinic.Clinical.Flags;
+using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Rules.Volume;

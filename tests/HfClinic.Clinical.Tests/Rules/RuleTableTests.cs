@@ -1,5 +1,6 @@
 using System.Text.RegularExpressions;
 using HfClinic.Clinical.Rules;
+using HfClinic.Clinical.Rules.Titration;
 using HfClinic.Clinical.Sources;
 
 namespace HfClinic.Clinical.Tests.Rules;
@@ -11,7 +12,7 @@ public partial class RuleTableTests
     {
         var cancel = TestContext.Current.CancellationToken;
         var path = Path.Combine(RepositoryRoot(), "DEVELOPERS.md");
-        var table = $"<!-- rules -->\n{RuleTable.Markdown(RuleBook.All, SourceTable.Load())}<!-- /rules -->";
+        var table = $"<!-- rules -->\n{RuleTable.Markdown(RuleBook.All.Concat(TitrationRules.All), SourceTable.Load())}<!-- /rules -->";
         var text = await File.ReadAllTextAsync(path, cancel);
         if (Environment.GetEnvironmentVariable("HFCLINIC_WRITE_DOCS") == "1")
         {

@@ -18,20 +18,9 @@ internal static class DiureticChange
     /// The last day, up to the picture's, on which the daily milligrams of any diuretic were not those of the day before.
     /// The first record of a patient's diuretics counts as a change.
     /// </summary>
-    public static DateOnly? Last(PatientPicture picture)
-    {
-        var courses = picture.DoseCourses.Where(course => Diuretics.Contains(course.Medicine)).ToList();
-        var days = courses.Select(course => course.From)
-            .Concat(courses.Where(course => course.Until is not null).Select(course => course.Until!.Value))
-            .Where(day => day <= picture.AsOf)
-            .OrderDescending();
-        return days.Cast<DateOnly?>().FirstOrDefault(day => Changed(courses, day!.Value));
-    }
-
-    private static bool Changed(List<DoseCourse> courses, DateOnly day) => courses
+    public static DateOnly? Last(PatientPicture picture) => picture.DoseCourses
+        .Where(course => Diuretics.Contains(course.Medicine))
         .GroupBy(course => course.Medicine)
-        .Any(medicine => DailyMilligrams(medicine, day) != DailyMilligrams(medicine, day.AddDays(-1)));
-
-    private static decimal DailyMilligrams(IEnumerable<DoseCourse> courses, DateOnly day) =>
-        courses.Where(course => course.HoldsOn(day)).Sum(course => course.DailyMilligrams);
+        .SelectMany(courses => DoseHistory.Changes([.. courses], picture.AsOf))
+        .Max(day => (DateOnly?)day);
 }
