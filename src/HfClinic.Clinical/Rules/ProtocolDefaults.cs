@@ -8,7 +8,7 @@ public static class ProtocolDefaults
 {
     private const string File = "protocol.json";
 
-    private static readonly ImmutableHashSet<string> Units = ["g", "%", "days", "hours", "mmHg"];
+    private static readonly ImmutableHashSet<string> Units = ["g", "g/day", "%", "days", "hours", "mmHg", "mmol/L", "µmol/L", "sd"];
 
     /// <summary>Reads the embedded table as protocol version 0, profile ESC.</summary>
     /// <exception cref="TableFaultException">The table is faulty.</exception>
