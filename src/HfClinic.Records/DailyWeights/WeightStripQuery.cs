@@ -1,6 +1,7 @@
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
 using HfClinic.Clinical.Weights;
+using HfClinic.Records.Flags;
 using HfClinic.Records.Medicines;
 using HfClinic.Records.Readings;
 using HfClinic.Records.Settings;
@@ -17,10 +18,15 @@ public sealed record DiureticStep(DateOnly Day, string Words);
 /// <summary>What a weight strip draws of one patient.</summary>
 /// <param name="Days">The weight that stands for each day that has one.</param>
 /// <param name="Held">Readings set aside.</param>
+/// <param name="Trend">The filtered line as stored by the last assessment; it reaches back <see cref="TrendLine.Days"/> days.</param>
 public sealed record WeightStripData(
-    IReadOnlyList<WeightReading> Days, IReadOnlyList<WeightReading> Held, IReadOnlyList<TargetStep> Targets, IReadOnlyList<DiureticStep> Diuretics)
+    IReadOnlyList<WeightReading> Days,
+    IReadOnlyList<WeightReading> Held,
+    IReadOnlyList<TargetStep> Targets,
+    IReadOnlyList<DiureticStep> Diuretics,
+    IReadOnlyList<TrendPoint> Trend)
 {
-    public static readonly WeightStripData Nothing = new([], [], [], []);
+    public static readonly WeightStripData Nothing = new([], [], [], [], []);
 }
 
 /// <summary>Reads the weights of the rows on screen.</summary>
@@ -52,11 +58,15 @@ public sealed class WeightStripQuery(IDbContextFactory<ClinicDb> databases, Clin
             .OrderBy(course => course.From)
             .Select(course => new { course.PatientId, course.From, course.Medicine, course.DoseMilligrams, course.TimesDaily }).ToListAsync(cancellation))
             .ToLookup(row => row.PatientId, row => new DiureticStep(row.From, DoseWords.Of(row.Medicine, row.DoseMilligrams, row.TimesDaily)));
+        var lines = await db.PatientSummaries.AsNoTracking().Where(summary => patients.Contains(summary.PatientId))
+            .Select(summary => new { summary.PatientId, summary.TrendLine })
+            .ToDictionaryAsync(row => row.PatientId, row => row.TrendLine, cancellation);
         return patients.ToDictionary(patient => patient, patient => new WeightStripData(
             DaySeries.ReadingsOf(weights[patient]),
             [.. weights[patient].Where(reading => reading.Held is not null)],
             TargetsWithin([.. targets[patient]], from),
-            [.. diuretics[patient]]));
+            [.. diuretics[patient]],
+            [.. TrendLine.Read(lines.GetValueOrDefault(patient, "")).Where(point => point.Day >= from && point.Day <= until)]));
     }
 
     /// <summary>The target that held when the strip begins, and the later ones.</summary>
