@@ -17,27 +17,24 @@ public abstract class TrendRule : VolumeRule
             return [];
         }
 
-        return WhyNot(picture, protocol) is { } missing ? [CannotTell(missing)] : [Look(LookAt(picture), protocol)];
+        var summary = WeightSummary.Of(picture);
+        return WhyNot(summary, picture, protocol) is { } missing ? [CannotTell(missing)] : [Look(LookAt(summary, picture), protocol)];
     }
 
-    /// <summary>Whether the trend can be used, and what it shows; null when it cannot.</summary>
-    public static TrendLook? Of(PatientPicture picture, ClinicProtocol protocol) =>
-        WhyNot(picture, protocol) is null ? LookAt(picture) : null;
+    /// <summary>What the trend shows; null when it cannot be used.</summary>
+    protected static TrendLook? Of(PatientPicture picture, ClinicProtocol protocol) =>
+        WeightSummary.Of(picture) is var summary && WhyNot(summary, picture, protocol) is null ? LookAt(summary, picture) : null;
 
     /// <summary>Whether the clinic uses the rule's thresholds.</summary>
     protected abstract bool IsOn(ClinicProtocol protocol);
 
     protected abstract Finding Look(TrendLook look, ClinicProtocol protocol);
 
-    private static TrendLook LookAt(PatientPicture picture)
-    {
-        var latest = WeightSummary.Of(picture).Latest!;
-        return new TrendLook(picture, latest, picture.Trend.On(latest.Day)!.Value);
-    }
+    private static TrendLook LookAt(WeightSummary summary, PatientPicture picture) =>
+        new(picture, summary.Latest!, picture.Trend.On(summary.Latest!.Day)!.Value);
 
-    private static string? WhyNot(PatientPicture picture, ClinicProtocol protocol)
+    private static string? WhyNot(WeightSummary summary, PatientPicture picture, ClinicProtocol protocol)
     {
-        var summary = WeightSummary.Of(picture);
         if (summary.Latest is not { } latest)
         {
             return "no accepted weight";
