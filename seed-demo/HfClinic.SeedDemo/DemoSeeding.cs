@@ -19,7 +19,9 @@ namespace HfClinic.SeedDemo;
 internal sealed class DemoSeeding(IServiceProvider services, SeedClock clock, DemoDays days, Team team, DateTimeOffset now)
 {
     private const int FirstClinicNumber = 1000;
-    private const int BatchSize = 40;
+    /// <summary>Small, because every save looks through all rows of the piece of work.</summary>
+    private const int BatchSize = 12;
+    private const int ReportEvery = 60;
     private static readonly Actor Demo = Actor.Program("demo");
     private static readonly TimeOnly BeforeAnyMoment = new(7, 0);
     private readonly ClinicWork work = services.GetRequiredService<ClinicWork>();
@@ -38,7 +40,10 @@ internal sealed class DemoSeeding(IServiceProvider services, SeedClock clock, De
         foreach (var batch in Enumerable.Range(stories.Count, patients - stories.Count).Chunk(BatchSize))
         {
             await AddAsync([.. batch.Select(number => (number, quiet.Draw(number, number - stories.Count)))], numbers, cancellation);
-            log.LogInformation("Demo clinic: {Done} of {Patients} patients.", batch[^1] + 1, patients);
+            if (batch[^1] / ReportEvery != (batch[0] - 1) / ReportEvery)
+            {
+                log.LogInformation("Demo clinic: {Done} of {Patients} patients.", batch[^1] + 1, patients);
+            }
         }
 
         await FinishAsync(storyIds, patients, cancellation);
@@ -52,7 +57,12 @@ internal sealed class DemoSeeding(IServiceProvider services, SeedClock clock, De
             foreach (var (number, patient) in patients)
             {
                 var clinicNumber = string.Create(CultureInfo.InvariantCulture, $"SM-{FirstClinicNumber + clinicNumbers[number]}");
-                ids.Add(await rows.AddAsync(patient, number, clinicNumber, cancellation));
+                ids.Add(await rows.EnrolAsync(patient, number, clinicNumber, cancellation));
+            }
+
+            foreach (var (id, entry) in ids.Zip(patients))
+            {
+                rows.AddHistory(id, entry.Patient);
             }
 
             var readings = patients.Zip(ids, (entry, id) => rows.ReadingsOf(id, entry.Patient)).SelectMany(reading => reading);

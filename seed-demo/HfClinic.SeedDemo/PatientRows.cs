@@ -18,10 +18,10 @@ internal sealed class PatientRows(WorkScope scope, DemoDays days, Team team)
 {
     private static readonly TimeOnly VisitTime = new(10, 40);
 
-    /// <summary>Enrols the patient and adds everything but the readings.</summary>
+    /// <summary>Enrols the patient.</summary>
     /// <param name="number">Counted over all patients; decides phone and nurse.</param>
     /// <returns>The patient's identifier.</returns>
-    public async Task<long> AddAsync(DemoPatient patient, int number, string clinicNumber, CancellationToken cancellation)
+    public async Task<long> EnrolAsync(DemoPatient patient, int number, string clinicNumber, CancellationToken cancellation)
     {
         var id = await EnrolPatient.AddAsync(scope, DetailsOf(patient, number, clinicNumber), cancellation);
         if (patient.LeftDay is { } left)
@@ -30,6 +30,12 @@ internal sealed class PatientRows(WorkScope scope, DemoDays days, Team team)
             (row.LeftOn, row.LeftBecause) = (days.Date(left), "Moved away; care goes on elsewhere");
         }
 
+        return id;
+    }
+
+    /// <summary>Adds the patient's past, but for the readings.</summary>
+    public void AddHistory(long id, DemoPatient patient)
+    {
         scope.Db.TargetWeights.AddRange(patient.Targets.Select(target => new TargetWeight
         {
             PatientId = id, From = days.Date(target.Day), Grams = target.Weight.Grams, Reason = target.Reason,
@@ -47,7 +53,6 @@ internal sealed class PatientRows(WorkScope scope, DemoDays days, Team team)
         }));
         AddMedicines(id, patient);
         AddTestsAndVisits(id, patient);
-        return id;
     }
 
     /// <summary>The patient's readings up to now.</summary>

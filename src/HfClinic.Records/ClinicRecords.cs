@@ -1,3 +1,4 @@
+using HfClinic.Clinical.Sources;
 using HfClinic.Records.Access;
 using HfClinic.Records.Audit;
 using HfClinic.Records.Chart;
@@ -73,12 +74,14 @@ public static class ClinicRecords
     {
         services.AddSingleton<DailyWeightsQuery>();
         services.AddSingleton<WeightStripQuery>();
+        services.AddSingleton<DailyListQuery>();
         services.AddSingleton<WhyQuery>();
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
         services.AddSingleton<FlagBehaviourQuery>();
         services.AddSingleton<AuditQuery>();
+        services.AddSingleton(_ => SourceTable.Load());
         services.AddSingleton<ImportReports>();
     }
 

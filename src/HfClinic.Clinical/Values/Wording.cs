@@ -53,6 +53,12 @@ public static class Wording
     /// <summary>A date: "03 Mar 2026".</summary>
     public static string Day(DateOnly day) => day.ToString("dd MMM yyyy", CultureInfo.InvariantCulture);
 
+    /// <summary>A date with its day of the week, for headings: "Tuesday 03 Mar 2026".</summary>
+    public static string LongDay(DateOnly day) => day.ToString("dddd dd MMM yyyy", CultureInfo.InvariantCulture);
+
+    /// <summary>A time of day: "07:12".</summary>
+    public static string Time(DateTime time) => time.ToString("HH:mm", CultureInfo.InvariantCulture);
+
     /// <summary>A date whose year is plain from where it stands: "03 Mar".</summary>
     public static string ShortDay(DateOnly day) => day.ToString("dd MMM", CultureInfo.InvariantCulture);
 

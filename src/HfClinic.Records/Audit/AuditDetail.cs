@@ -18,7 +18,8 @@ public static partial class AuditDetail
 
     /// <summary>The values before and after, side by side, in the order of the line.</summary>
     /// <param name="unit">The unit weights are written in.</param>
-    public static IReadOnlyList<AuditField> Of(AuditEntry entry, WeightUnit unit)
+    /// <param name="people">Names for the people a value points to; without one the identifier is shown.</param>
+    public static IReadOnlyList<AuditField> Of(AuditEntry entry, WeightUnit unit, IReadOnlyDictionary<Guid, string>? people = null)
     {
         if (entry.Before is null && entry.After is { } sentence && !sentence.StartsWith('{'))
         {
@@ -29,9 +30,15 @@ public static partial class AuditDetail
         var isWeight = new[] { before, after }.Any(values => values.GetValueOrDefault("Kind").ValueKind == JsonValueKind.String
             && values["Kind"].GetString() == nameof(ReadingKind.Weight));
         return [.. before.Keys.Concat(after.Keys).Distinct()
-            .Where(key => !NotShown.Contains(key))
-            .Select(key => new AuditField(Words(key), Shown(before, key, isWeight, unit), Shown(after, key, isWeight, unit)))];
+            .Where(key => !NotShown.Contains(key) && !IsTheLinesOwn(key, after, entry.ByName))
+            .Select(key => new AuditField(Words(key), Shown(before, key, isWeight, unit, people), Shown(after, key, isWeight, unit, people)))];
     }
+
+    /// <summary>Who did it stands at the head of the line already.</summary>
+    private static bool IsTheLinesOwn(string key, Dictionary<string, JsonElement> after, string byName) =>
+        key.EndsWith("ById", StringComparison.Ordinal)
+        || (key.EndsWith("ByName", StringComparison.Ordinal) && after.TryGetValue(key, out var name)
+            && name.ValueKind == JsonValueKind.String && name.GetString() == byName);
 
     private static Dictionary<string, JsonElement> Values(string? json) => json is null
         ? []
@@ -43,7 +50,8 @@ public static partial class AuditDetail
         return Wording.Sentence(words.EndsWith(" id", StringComparison.Ordinal) ? words[..^3] : words == "grams" ? "weight" : words);
     }
 
-    private static string? Shown(Dictionary<string, JsonElement> values, string key, bool isWeight, WeightUnit unit)
+    private static string? Shown(
+        Dictionary<string, JsonElement> values, string key, bool isWeight, WeightUnit unit, IReadOnlyDictionary<Guid, string>? people)
     {
         if (!values.TryGetValue(key, out var value))
         {
@@ -57,7 +65,7 @@ public static partial class AuditDetail
             JsonValueKind.False => "no",
             JsonValueKind.Number when (key == "Grams" || (isWeight && key == "Value")) && value.TryGetInt32(out var grams) =>
                 Wording.Weight(new Weight(grams), unit),
-            JsonValueKind.String => Text(value.GetString()!),
+            JsonValueKind.String => value.TryGetGuid(out var id) && people?.GetValueOrDefault(id) is { } name ? name : Text(value.GetString()!),
             _ => value.GetRawText(),
         };
     }

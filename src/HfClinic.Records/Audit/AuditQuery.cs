@@ -11,8 +11,8 @@ public sealed record AuditRequest(
     DateTime? From = null, DateTime? Until = null, string Person = "", long? PatientId = null, int Skip = 0, int Take = 100,
     bool ChangesOnly = false, string Patient = "");
 
-/// <summary>A line with the name of the patient it concerns.</summary>
-public sealed record AuditRow(AuditEntry Entry, string? PatientName);
+/// <summary>A line with the name of the patient it concerns, and the names of the clinic's people for the values in it.</summary>
+public sealed record AuditRow(AuditEntry Entry, string? PatientName, IReadOnlyDictionary<Guid, string> People);
 
 /// <summary>Reads the record of access, newest first.</summary>
 public sealed class AuditQuery(IDbContextFactory<ClinicDb> databases)
@@ -20,12 +20,14 @@ public sealed class AuditQuery(IDbContextFactory<ClinicDb> databases)
     public async Task<IReadOnlyList<AuditRow>> RowsAsync(AuditRequest request, CancellationToken cancellation = default)
     {
         await using var db = await databases.CreateDbContextAsync(cancellation);
-        return await (from entry in Filtered(db, request).OrderByDescending(entry => entry.Id).Skip(request.Skip).Take(request.Take)
-                      join patient in db.Patients on entry.PatientId equals patient.Id into patients
-                      from patient in patients.DefaultIfEmpty()
-                      orderby entry.Id descending
-                      select new AuditRow(entry, patient == null ? null : patient.FamilyName + ", " + patient.GivenName))
+        var people = await db.Users.AsNoTracking().ToDictionaryAsync(user => user.Id, user => user.DisplayName, cancellation);
+        var rows = await (from entry in Filtered(db, request).OrderByDescending(entry => entry.Id).Skip(request.Skip).Take(request.Take)
+                          join patient in db.Patients on entry.PatientId equals patient.Id into patients
+                          from patient in patients.DefaultIfEmpty()
+                          orderby entry.Id descending
+                          select new { Entry = entry, Name = patient == null ? null : patient.FamilyName + ", " + patient.GivenName })
             .ToListAsync(cancellation);
+        return [.. rows.Select(row => new AuditRow(row.Entry, row.Name, people))];
     }
 
     public async Task<int> CountAsync(AuditRequest request, CancellationToken cancellation = default)

@@ -42,7 +42,7 @@ public sealed record WhyPanelData(
     IReadOnlyList<WhyBeside> Beside,
     IReadOnlyList<WhyBefore> Before,
     IReadOnlyList<Question> Questions,
-    WeightStripData Strip);
+    StripContent Strip);
 
 /// <summary>Reads why a patient stands on the list.</summary>
 public sealed class WhyQuery(IDbContextFactory<ClinicDb> databases, WeightStripQuery strips, ClinicClock clock)

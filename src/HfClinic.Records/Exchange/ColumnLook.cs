@@ -34,6 +34,9 @@ public sealed class ColumnLook(string heading)
         _ => null,
     };
 
+    /// <summary>An example date as it would be read by this order.</summary>
+    public static DateOnly ReadExample(string text, DateOrder order) => DateText.Read(text, order).Day;
+
     internal void Take(string text)
     {
         if (text.Length == 0)

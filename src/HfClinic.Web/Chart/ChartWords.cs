@@ -90,8 +90,13 @@ public static class ChartWords
         ? Words.Limit(new Weight((int)value), unit)
         : string.Create(CultureInfo.InvariantCulture, $"{value:0.###} {thresholdUnit}");
 
-    /// <summary>I to IV.</summary>
-    public static string Nyha(int nyhaClass) => nyhaClass switch { 1 => "I", 2 => "II", 3 => "III", _ => "IV" };
+    /// <summary>"Potassium", "NT-proBNP", "TSAT": abbreviations as laboratories print them.</summary>
+    public static string Analyte(string key) => key switch
+    {
+        "nt-probnp" => "NT-proBNP",
+        "bnp" or "tsat" or "tsh" => key.ToUpperInvariant(),
+        _ => Words.Sentence(key.Replace('-', ' ')),
+    };
 
     /// <summary>Titles of the published sources of a flag.</summary>
     public static IReadOnlyList<string> SourceTitles(string keys) =>

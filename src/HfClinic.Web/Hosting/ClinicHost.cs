@@ -4,6 +4,7 @@ using HfClinic.Records.Access;
 using HfClinic.Records.Reassessment;
 using HfClinic.Records.Storage;
 using HfClinic.Web.Endpoints;
+using HfClinic.Web.ReadingsIn;
 using HfClinic.Web.Shell;
 using HfClinic.Web.SignIn;
 using HfClinic.Web.Ui;
@@ -28,6 +29,7 @@ public static class ClinicHost
         services.AddSingleton<DataFolder>();
         services.AddClinicRecords(provider => StorageOf(provider, start));
         services.AddHostedService<MorningSweepService>();
+        services.AddReadingsIn();
         services.AddRazorComponents().AddInteractiveServerComponents();
         services.AddMudServices();
         services.AddScoped<Keys>();
@@ -58,6 +60,7 @@ public static class ClinicHost
         app.MapStaticAssets().AllowAnonymous();
         app.MapHealth();
         app.MapSignIn();
+        app.MapReadingsIn();
         app.MapRazorComponents<App>().AddInteractiveServerRenderMode(server => server.ContentSecurityFrameAncestorsPolicy = null);
     }
 

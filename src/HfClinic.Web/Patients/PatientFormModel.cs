@@ -75,5 +75,5 @@ public sealed class PatientFormModel
         return (details, [.. problems, .. details.Problems(today)]);
     }
 
-    private static string Shown(DateOnly? day) => day is { } known ? Clinical.Values.Wording.Day(known) : "";
+    private static string Shown(DateOnly? day) => day is { } known ? Wording.Day(known) : "";
 }

@@ -1,6 +1,7 @@
 using System.Globalization;
 using HfClinic.Clinical.Values;
 using HfClinic.Records;
+using HfClinic.Records.DailyWeights;
 
 namespace HfClinic.Web.Ui;
 
@@ -28,7 +29,7 @@ public static class Typed
             return day;
         }
 
-        problems.Add(new(field, $"“{text.Trim()}” cannot be read as a day for sure.", $"Write it as {Clinical.Values.Wording.Day(today)}."));
+        problems.Add(new(field, $"“{text.Trim()}” cannot be read as a day for sure.", $"Write it as {Wording.Day(today)}."));
         return null;
     }
 
@@ -37,7 +38,7 @@ public static class Typed
     {
         if (string.IsNullOrWhiteSpace(text))
         {
-            problems.Add(new(field, "The day is missing.", $"Write it as {Clinical.Values.Wording.Day(today)}."));
+            problems.Add(new(field, "The day is missing.", $"Write it as {Wording.Day(today)}."));
             return null;
         }
 
@@ -47,19 +48,13 @@ public static class Typed
     /// <summary>A weight, "74.6", "74,6 kg" or "164.5 lb"; without a unit it is the clinic's.</summary>
     public static Weight? Weight(List<Problem> problems, string field, string text, WeightUnit unit)
     {
-        var words = text.Trim().ToLowerInvariant();
-        var (number, typedUnit) = words.EndsWith("kg", StringComparison.Ordinal) ? (words[..^2], WeightUnit.Kilograms)
-            : words.EndsWith("lbs", StringComparison.Ordinal) ? (words[..^3], WeightUnit.Pounds)
-            : words.EndsWith("lb", StringComparison.Ordinal) ? (words[..^2], WeightUnit.Pounds)
-            : (words, unit);
-        if (Number(number) is { } value and > 0 and < 1000)
+        var read = CalledInWeight.Read(text, unit, field, out var problem);
+        if (read is null)
         {
-            return typedUnit == WeightUnit.Pounds ? Clinical.Values.Weight.FromPounds(value) : Clinical.Values.Weight.FromKilograms(value);
+            problems.Add(problem ?? new(field, "The weight is missing.", $"Write a number with its unit, as 74.6 {Wording.Symbol(unit)}."));
         }
 
-        problems.Add(new(field, words.Length == 0 ? "The weight is missing." : $"“{text.Trim()}” cannot be read as a weight.",
-            $"Write a number with its unit, as 74.6 {Clinical.Values.Wording.Symbol(unit)}."));
-        return null;
+        return read?.Weight;
     }
 
     /// <summary>A number with a decimal point or comma; null when it is none.</summary>

@@ -1,9 +1,11 @@
+using HfClinic.Clinical.Values;
+
 namespace HfClinic.Web.Ui;
 
 /// <summary>The strip as sentences, for those who hear the page and for the tooltip.</summary>
 public static class WeightStripWords
 {
-    public static string Describe(WeightStripData data)
+    public static string Describe(WeightStripData data, WeightUnit unit)
     {
         var readings = data.Readings.Where(r => r.Day >= data.From && r.Day <= data.To).OrderBy(r => r.Day).ToList();
         var used = readings.Where(r => !r.Held).ToList();
@@ -11,7 +13,7 @@ public static class WeightStripWords
         var days = data.To.DayNumber - data.From.DayNumber + 1;
         List<string> sentences =
         [
-            $"Weights from {Wording.Day(data.From)} to {Wording.Day(data.To)}, {Wording.Count(days, "day", "days")}: {Span(used)}",
+            $"Weights from {Wording.Day(data.From)} to {Wording.Day(data.To)}, {Wording.Count(days, "day", "days")}: {Span(used, unit)}",
         ];
         if (MissingDays(data).Count() is > 0 and var missing)
         {
@@ -20,7 +22,7 @@ public static class WeightStripWords
 
         if (data.Targets.Where(t => t.From <= data.To).MaxBy(t => t.From) is { } target)
         {
-            sentences.Add($"Target {Wording.Kilograms(target.Grams)} kg");
+            sentences.Add($"Target {Weight(target.Grams, unit)}");
         }
 
         if (used.Count(r => r.Raised) is > 0 and var raised)
@@ -28,7 +30,7 @@ public static class WeightStripWords
             sentences.Add($"{Wording.Count(raised, "weight", "weights")} raised a flag");
         }
 
-        sentences.AddRange(held.Select(r => $"{Wording.Kilograms(r.Grams)} kg on {Wording.Day(r.Day)} is held to be checked"));
+        sentences.AddRange(held.Select(r => $"{Weight(r, unit)} is held to be checked"));
         sentences.AddRange(ChangesIn(data).Select(c => $"{Wording.Day(c.Day)}: {c.What}"));
         return string.Join(". ", sentences) + ".";
     }
@@ -51,13 +53,15 @@ public static class WeightStripWords
     public static IEnumerable<StripChange> ChangesIn(WeightStripData data) =>
         data.DiureticChanges.Where(c => c.Day >= data.From && c.Day <= data.To).OrderBy(c => c.Day);
 
-    private static string Span(List<StripReading> used) => used.Count switch
+    private static string Span(List<StripReading> used, WeightUnit unit) => used.Count switch
     {
         0 => "none",
-        1 => $"one, {Weight(used[0])}",
-        _ => $"{Wording.Count(used.Count, "weight", "weights")}, first {Weight(used[0])}, last {Weight(used[^1])}, " +
-             $"lowest {Wording.Kilograms(used.Min(r => r.Grams))} kg, highest {Wording.Kilograms(used.Max(r => r.Grams))} kg",
+        1 => $"one, {Weight(used[0], unit)}",
+        _ => $"{Wording.Count(used.Count, "weight", "weights")}, first {Weight(used[0], unit)}, last {Weight(used[^1], unit)}, " +
+             $"lowest {Weight(used.Min(r => r.Grams), unit)}, highest {Weight(used.Max(r => r.Grams), unit)}",
     };
 
-    private static string Weight(StripReading reading) => $"{Wording.Kilograms(reading.Grams)} kg on {Wording.Day(reading.Day)}";
+    private static string Weight(StripReading reading, WeightUnit unit) => $"{Weight(reading.Grams, unit)} on {Wording.Day(reading.Day)}";
+
+    private static string Weight(int grams, WeightUnit unit) => Wording.Weight(new Weight(grams), unit);
 }

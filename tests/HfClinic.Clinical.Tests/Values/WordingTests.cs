@@ -42,6 +42,8 @@ public class WordingTests
         try
         {
             Assert.Equal("03 Mar 2026", Wording.Day(new DateOnly(2026, 3, 3)));
+            Assert.Equal("Tuesday 03 Mar 2026", Wording.LongDay(new DateOnly(2026, 3, 3)));
+            Assert.Equal("07:12", Wording.Time(new DateTime(2026, 3, 3, 7, 12, 59)));
             Assert.Equal("03 Mar", Wording.ShortDay(new DateOnly(2026, 3, 3)));
             Assert.Equal("74.6 kg", Wording.Weight(new Weight(74_600), WeightUnit.Kilograms));
         }

@@ -25,6 +25,21 @@ public class AuditDetailTests
     public void Writes_values_as_screens_do(string after, string field, string shown) =>
         Assert.Equal(shown, AuditDetail.Of(Line(null, after), WeightUnit.Kilograms).Single(row => row.Field == field).After);
 
+    [Theory]
+    [InlineData("Test", 1)]
+    [InlineData("Somebody Else", 2)]
+    public void Who_did_it_is_not_said_twice(string name, int fields) => Assert.Equal(fields, AuditDetail.Of(
+        Line(null, $$"""{"Reason":"misheard","ById":"01a231f3-49d0-7a22-b893-dd17061ca04c","ByName":"{{name}}"}"""), WeightUnit.Kilograms).Count);
+
+    [Fact]
+    public void A_person_pointed_to_is_named()
+    {
+        var nurse = Guid.Parse("01a231f3-49d0-7a22-b893-dd17061ca04c");
+        var fields = AuditDetail.Of(Line("""{"NurseId":null}""", $$"""{"NurseId":"{{nurse}}"}"""), WeightUnit.Kilograms,
+            new Dictionary<Guid, string> { [nurse] = "Mo O'Kafor" });
+        Assert.Equal(new AuditField("Nurse", null, "Mo O'Kafor"), Assert.Single(fields));
+    }
+
     [Fact]
     public void A_sentence_stays_a_sentence() =>
         Assert.Equal(new AuditField("", null, "Mo O'Kafor: Nurse → Prescriber"), Assert.Single(AuditDetail.Of(Line(null, "Mo O'Kafor: Nurse → Prescriber"), WeightUnit.Kilograms)));

@@ -1,6 +1,6 @@
 using HfClinic.Clinical.Values;
 
-namespace HfClinic.Web.Patients;
+namespace HfClinic.Web.Ui;
 
 /// <summary>A person in a few words.</summary>
 public static class PersonWords
@@ -11,7 +11,7 @@ public static class PersonWords
         var words = new List<string>();
         if (birthDate is { } born)
         {
-            words.Add(Clinical.Values.Wording.Count(Age(born, today), "year", "years"));
+            words.Add(Years(born, today));
         }
 
         if (sex != Sex.NotRecorded)
@@ -19,8 +19,11 @@ public static class PersonWords
             words.Add(sex == Sex.Female ? "woman" : "man");
         }
 
-        return words.Count == 0 ? Clinical.Values.Wording.Nothing : string.Join(", ", words);
+        return words.Count == 0 ? Wording.Nothing : string.Join(", ", words);
     }
+
+    /// <summary>"78 years"; "age not known" without a birth date.</summary>
+    public static string AgeOnly(DateOnly? birthDate, DateOnly today) => birthDate is { } born ? Years(born, today) : "age not known";
 
     /// <summary>Completed years of life; a person born on 29 Feb completes one on 28 Feb in other years.</summary>
     public static int Age(DateOnly born, DateOnly today)
@@ -35,4 +38,15 @@ public static class PersonWords
         Sex.Male => "man",
         _ => "not recorded",
     };
+
+    /// <summary>The New York Heart Association class as it is written: "III".</summary>
+    public static string Nyha(int nyhaClass) => nyhaClass switch
+    {
+        1 => "I",
+        2 => "II",
+        3 => "III",
+        _ => "IV",
+    };
+
+    private static string Years(DateOnly born, DateOnly today) => Wording.Count(Age(born, today), "year", "years");
 }
