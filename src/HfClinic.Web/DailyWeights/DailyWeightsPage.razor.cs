@@ -30,6 +30,7 @@ public sealed partial class DailyWeightsPage(
     private DailyList? list;
     private ListAddress address = ListAddress.Read(null, null, null);
     private string typedSearch = "";
+    private string sentSearch = "";
     private string? failure;
     private string said = "";
     private DateTime readAt;
@@ -77,9 +78,9 @@ public sealed partial class DailyWeightsPage(
             return;
         }
 
-        if (wanted.Search != address.Search && wanted.Search != typedSearch.Trim())
+        if (wanted.Search != address.Search && wanted.Search != sentSearch)
         {
-            typedSearch = wanted.Search;
+            typedSearch = sentSearch = wanted.Search;
         }
 
         (address, take) = (wanted, RowsAtATime);
@@ -120,13 +121,13 @@ public sealed partial class DailyWeightsPage(
         return LoadAsync();
     }
 
-    private void SearchTyped(ChangeEventArgs e)
-    {
-        typedSearch = e.Value as string ?? "";
-        search?.Start();
-    }
+    private void SearchTyped() => search?.Start();
 
-    private void SearchNow() => navigation.NavigateTo((address with { Search = typedSearch.Trim() }).Href, replace: true);
+    private void SearchNow()
+    {
+        sentSearch = typedSearch.Trim();
+        navigation.NavigateTo((address with { Search = sentSearch }).Href, replace: true);
+    }
 
     private void OpenAsync(long patient) => (open, said) = (patient, "");
 

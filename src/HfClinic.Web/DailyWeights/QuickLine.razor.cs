@@ -29,17 +29,24 @@ public sealed partial class QuickLine(RecordReadings record, ClinicClock clock, 
     [CascadingParameter]
     public WeightUnit Unit { get; set; }
 
+    // Bound properties: a bound field is never overwritten by an answer that comes later than the next key.
+    private string Weight { get => line.Weight; set => Type(line with { Weight = value ?? "" }); }
+
+    private string Pressure { get => line.Pressure; set => Type(line with { Pressure = value ?? "" }); }
+
+    private string Pulse { get => line.Pulse; set => Type(line with { Pulse = value ?? "" }); }
+
+    private string Symptoms { get => line.Symptoms; set => Type(line with { Symptoms = value ?? "" }); }
+
     private string? WeightEcho => CalledInWeight.Read(line.Weight, Unit, nameof(line.Weight), out _)?.Words;
 
     private CalledInSymptoms Told => CalledInSymptoms.Read(line.Symptoms);
 
-    private string SymptomEcho => Told.Symptoms != Symptoms.None ? SymptomWords.List(Told.Symptoms) : Told.AskedNone ? "asked, none told" : "";
+    private string SymptomEcho => Told.Symptoms != Clinical.Values.Symptoms.None ? SymptomWords.List(Told.Symptoms) : Told.AskedNone ? "asked, none told" : "";
 
     private string Unknown => string.Join(", ", Told.Unknown.Select(word => $"“{word}”"));
 
-    private bool OffersNote => saving.For(nameof(line.Symptoms)) is not null && Told is { Unknown.Count: > 0, Symptoms: not Symptoms.None, Unclear.Count: 0 };
-
-    private static string Text(ChangeEventArgs e) => e.Value as string ?? "";
+    private bool OffersNote => saving.For(nameof(line.Symptoms)) is not null && Told is { Unknown.Count: > 0, Symptoms: not Clinical.Values.Symptoms.None, Unclear.Count: 0 };
 
     private string? For(params string[] names) => names.Select(saving.For).FirstOrDefault(words => words is not null);
 

@@ -19,6 +19,7 @@ public sealed partial class WhoField(PatientSearch search, ClinicClock clock, Ti
     private PatientRow? chosen;
     private IReadOnlyList<PatientRow> found = [];
     private int at = -1;
+    private bool focused;
 
     /// <summary>What is wrong with it, from the form.</summary>
     [Parameter, EditorRequired]
@@ -76,10 +77,15 @@ public sealed partial class WhoField(PatientSearch search, ClinicClock clock, Ti
 
     protected override void OnInitialized() => suggest = new(time, Settle, () => InvokeAsync(SuggestAsync));
 
-    private void Typed(ChangeEventArgs e)
+    // Bound: a bound field is never overwritten by an answer that comes later than the next key.
+    private string Text
     {
-        (text, chosen, at) = (e.Value as string ?? "", null, -1);
-        suggest?.Start();
+        get => text;
+        set
+        {
+            (text, chosen, at) = (value ?? "", null, -1);
+            suggest?.Start();
+        }
     }
 
     private async Task SuggestAsync()
@@ -95,7 +101,11 @@ public sealed partial class WhoField(PatientSearch search, ClinicClock clock, Ti
             var people = string.IsNullOrWhiteSpace(asked) ? [] : await search.RowsAsync(asked, PatientsView.Enrolled, 0, MostShown);
             if (asked == text && chosen is null)
             {
-                (found, at) = (people, people.Count == 1 ? 0 : -1);
+                (found, at) = focused ? (people, people.Count == 1 ? 0 : -1) : ([], -1);
+                if (!focused && people.Count == 1)
+                {
+                    Choose(people[0]);
+                }
             }
         }
         catch (Exception reason) when (DatabaseAway.Is(reason))
@@ -117,6 +127,7 @@ public sealed partial class WhoField(PatientSearch search, ClinicClock clock, Ti
 
     private void Left()
     {
+        focused = false;
         if (chosen is null && at >= 0 && at < found.Count)
         {
             Choose(found[at]);

@@ -39,6 +39,7 @@ public class ReadFilesInTests(BrowserFixture browser)
 
     private static async Task ReadInAsync(IPage page, string file)
     {
+        await Expect(page.Locator("#file")).ToBeEnabledAsync(new() { Timeout = 60_000 });
         await page.Locator("#file").SetInputFilesAsync(Path.Combine(AppContext.BaseDirectory, "Files", "intake", file));
         var go = page.GetByRole(AriaRole.Button, new() { Name = "Read in" });
         await Expect(go).ToBeVisibleAsync(new() { Timeout = 60_000 });

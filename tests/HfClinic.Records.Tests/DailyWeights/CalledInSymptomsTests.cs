@@ -10,7 +10,7 @@ public class CalledInSymptomsTests
     [InlineData("Swollen ankles and dizziness", Symptoms.AnkleSwelling | Symptoms.Dizziness)]
     [InlineData("breathless at rest; sleeps in a chair", Symptoms.BreathlessAtRest | Symptoms.Orthopnoea)]
     [InlineData("light-headed + cough", Symptoms.Dizziness | Symptoms.Cough)]
-    [InlineData("œdema, oedéma", Symptoms.AnkleSwelling)]
+    [InlineData("oedéma", Symptoms.AnkleSwelling)]
     public void Words_stand_for_listed_symptoms(string typed, Symptoms expected) =>
         Assert.Equal(expected, CalledInSymptoms.Read(typed).Symptoms);
 

@@ -1,3 +1,4 @@
+using HfClinic.Clinical.Flags;
 using HfClinic.Clinical.Picture;
 using HfClinic.Records.Access;
 using HfClinic.Records.DailyWeights;
@@ -156,7 +157,7 @@ public class DailyWeightsQueryTests
         var quiet = await clinic.EnrolAsync(ClinicSteps.Someone with { ClinicNumber = "QUIET", NurseId = nurse });
         await clinic.WeighAsync(quiet, Today, 70.0m);
         var off = await clinic.EnrolWithGainAsync(ClinicSteps.Someone with { ClinicNumber = "OFF" });
-        var flags = await db.Flags.Where(flag => flag.PatientId == off).Select(flag => flag.Id).ToListAsync(TestContext.Current.CancellationToken);
+        var flags = await db.Flags.Where(flag => flag.PatientId == off && flag.State == FlagState.Open).Select(flag => flag.Id).ToListAsync(TestContext.Current.CancellationToken);
         await clinic.Get<PutOffFlag>().RunAsync(TestClinic.As(ClinicRole.Nurse), flags, Today.AddDays(3), "seen in clinic on Friday", TestContext.Current.CancellationToken);
         return nurse;
     }
