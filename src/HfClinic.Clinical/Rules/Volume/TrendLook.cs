@@ -31,6 +31,19 @@ public sealed record TrendLook(PatientPicture Picture, WeightReading Latest, Tre
         }
     }
 
+    /// <summary>
+    /// The weight the person is compared with, and its day: the scatter-free weight when the fluid last stood at the baseline,
+    /// or today's body mass where that lies further off (a baseline that moves the other way).
+    /// </summary>
+    private (double Kilograms, DateOnly Day) Baseline
+    {
+        get
+        {
+            var then = Picture.Trend.On(LastAtBaseline)!.Value.State.Expected;
+            return Math.Sign(Fluid) * (Day.State.Expected - then) < Math.Abs(Fluid) ? (Day.State.Mass, Latest.Day) : (then, LastAtBaseline);
+        }
+    }
+
     /// <summary>"4.1 kg above own baseline over 6 days; day-to-day scatter 0.5 kg".</summary>
     public string FluidWords(ClinicProtocol protocol)
     {
@@ -41,25 +54,22 @@ public sealed record TrendLook(PatientPicture Picture, WeightReading Latest, Tre
             .Where(day => Picture.Trend.On(day)?.Use == DayUse.Step)
             .Select(day => $"; in one step on {Wording.ShortDay(day)}: another scale or a true change")
             .FirstOrDefault();
-        return $"{Size(Fluid, protocol)} {side} own baseline over {Wording.Days(days)}{until}; day-to-day scatter {Scatter(protocol)}{step}";
+        return $"{Size(Day.State.Expected - Baseline.Kilograms, protocol)} {side} own baseline over {Wording.Days(days)}{until}; day-to-day scatter {Scatter(protocol)}{step}";
     }
 
     /// <summary>What the fluid part is compared with, in words.</summary>
     public string FluidLimit(Threshold limit, ClinicProtocol protocol) => string.Create(
         CultureInfo.InvariantCulture,
-        $"more than {Size((double)limit.Value * Picture.Trend.UsualFluidOn(Latest.Day) ?? 0, protocol)}, {limit.Value:0.0#} times this person's usual coming and going of fluid");
+        $"more than {Size((double)limit.Value * Picture.Trend.UsualFluidOn(Latest.Day) ?? 0, protocol)} of fluid, {limit.Value:0.0#} times this person's usual coming and going");
 
     /// <summary>The own baseline, the trend and its scatter as evidence, beside the weight that raised it.</summary>
     public IEnumerable<Evidence> FluidEvidence(ClinicProtocol protocol, Evidence weight)
     {
         var unit = protocol.WeightUnit;
-        yield return new Evidence("Own baseline", Wording.Weight(Grams(Day.State.Mass), unit), Latest.Day);
+        yield return new Evidence("Own baseline", Wording.Weight(Grams(Baseline.Kilograms), unit), Baseline.Day);
         yield return weight;
         yield return new Evidence("Weight with the scatter taken out", Wording.Weight(Grams(Day.State.Expected), unit), Latest.Day);
-        yield return new Evidence(
-            "The same when fluid last stood at the baseline",
-            Wording.Weight(Grams(Picture.Trend.On(LastAtBaseline)!.Value.State.Expected), unit),
-            LastAtBaseline);
+        yield return new Evidence("Of it counted as fluid", $"{Wording.Change(Grams(Fluid), unit)} {Wording.Symbol(unit)}", Latest.Day);
         yield return new Evidence("Day-to-day scatter", Scatter(protocol), Latest.Day);
         yield return Slope(protocol);
     }

@@ -31,14 +31,35 @@ public class FluidGainTests
         var finding = _rule.Read(Gaining);
 
         Assert.Matches(@"^\d\.\d kg above own baseline over \d days; day-to-day scatter 0\.\d kg$", finding.Statement);
-        Assert.Matches(@"^more than \d\.\d kg, 2\.0 times this person's usual coming and going of fluid$", finding.Limit);
+        Assert.Matches(@"^more than \d\.\d kg of fluid, 2\.0 times this person's usual coming and going$", finding.Limit);
         Assert.Equal(Urgency.ThisWeek, finding.Urgency);
         Assert.Equal(
-            ["Own baseline", "Today", "Weight with the scatter taken out", "The same when fluid last stood at the baseline", "Day-to-day scatter", "Change per week"],
+            ["Own baseline", "Today", "Weight with the scatter taken out", "Of it counted as fluid", "Day-to-day scatter", "Change per week"],
             finding.Evidence.Select(evidence => evidence.What));
         Assert.Equal("82.0 kg", finding.Evidence[1].Value);
-        Assert.Equal(Today.AddDays(-4), finding.Evidence[3].Day);
+        Assert.Equal(Today.AddDays(-4), finding.Evidence[0].Day);
         Assert.All(finding.Evidence, evidence => Assert.Contains("kg", evidence.Value));
+    }
+
+    [Fact]
+    public void The_amount_is_what_the_evidence_shows_between_baseline_and_now()
+    {
+        var finding = _rule.Read(Gaining);
+        var (baseline, now) = (Kilograms(finding.Evidence[0]), Kilograms(finding.Evidence[2]));
+
+        Assert.InRange(Kilograms(finding.Statement) - (now - baseline), -0.1m, 0.1m);
+        Assert.InRange(now - baseline, 1.2m, 2.2m);
+        Assert.Equal(80.0m, baseline, 0);
+    }
+
+    [Fact]
+    public void A_baseline_that_falls_meanwhile_does_not_make_a_gain_look_smaller()
+    {
+        var falling = AtHome.Target(-60, 80_000).WeighedDaily(0, [.. Enumerable.Range(0, 60).Select(day => 84_000 - (day * 60)), 81_800, 82_600, 83_200, 83_400]);
+
+        var finding = _rule.Read(falling);
+
+        Assert.True(Kilograms(finding.Statement) >= Kilograms(finding.Evidence[3]) - 0.1m);
     }
 
     [Fact]
@@ -107,6 +128,10 @@ public class FluidGainTests
 
         Assert.Equal((FlagChangeKind.NoLongerMet, FlagState.Open), (change.Kind, change.After.State));
     }
+
+    private static decimal Kilograms(Evidence evidence) => Kilograms(evidence.Value.TrimStart('+'));
+
+    private static decimal Kilograms(string words) => decimal.Parse(words[..words.IndexOf(' ')], System.Globalization.CultureInfo.InvariantCulture);
 
     private LiveFlag Open(Finding finding) => Assert.Single(FlagReconciler.Reconcile([], [finding], [_rule], Today)).After with { Id = 1 };
 }
