@@ -79,6 +79,7 @@ public static class ClinicRecords
         services.AddSingleton<PatientSearch>();
         services.AddSingleton<ChartQuery>();
         services.AddSingleton<QuestionsQuery>();
+        services.AddSingleton<FlagBehaviourQuery>();
         services.AddSingleton<AuditQuery>();
         services.AddSingleton(_ => SourceTable.Load());
         services.AddSingleton<ImportReports>();

@@ -51,6 +51,22 @@ internal static class Pictures
             "echocardiography"))],
     };
 
+    /// <summary>A weight every day, the last one on the given day.</summary>
+    public static PatientPicture WeighedDaily(this PatientPicture picture, int lastDay, params IEnumerable<int> grams)
+    {
+        int[] all = [.. grams];
+        return all.Index().Aggregate(picture, (so, weight) => so.Weighed(lastDay - all.Length + 1 + weight.Index, weight.Item));
+    }
+
+    /// <summary>So many weights about a usual one, 200 g above and below it by turns.</summary>
+    public static IEnumerable<int> About(int grams, int days) => Enumerable.Range(0, days).Select(day => grams + (day % 2 == 0 ? 200 : -200));
+
+    public static PatientPicture Tested(this PatientPicture picture, string analyte, int day, decimal value, int hour = 8) => picture with
+    {
+        BloodTests = [.. picture.BloodTests
+            .Append(new BloodResult(600, analyte, Today.AddDays(day).ToDateTime(new TimeOnly(hour, 0)), value)).OrderBy(test => test.LocalTime)],
+    };
+
     /// <summary>The one answer of a rule that answers once.</summary>
     public static Finding Read(this IRule rule, PatientPicture picture, ClinicProtocol? protocol = null) =>
         Assert.Single(rule.Assess(picture, protocol ?? Defaults));

@@ -579,6 +579,19 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     b.Property<bool>("CheckFailed")
                         .HasColumnType("boolean");
 
+                    b.Property<int?>("ExcessErrorGrams")
+                        .HasColumnType("integer");
+
+                    b.Property<int?>("ExcessGrams")
+                        .HasColumnType("integer");
+
+                    b.Property<int?>("FluidGrams")
+                        .HasColumnType("integer");
+
+                    b.Property<decimal?>("FluidScore")
+                        .HasPrecision(8, 3)
+                        .HasColumnType("numeric(8,3)");
+
                     b.Property<int?>("Gain1Day")
                         .HasColumnType("integer");
 
@@ -590,6 +603,15 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
 
                     b.Property<int>("HeldReadings")
                         .HasColumnType("integer");
+
+                    b.Property<bool>("IsFalling")
+                        .HasColumnType("boolean");
+
+                    b.Property<bool>("IsLearning")
+                        .HasColumnType("boolean");
+
+                    b.Property<bool>("IsRising")
+                        .HasColumnType("boolean");
 
                     b.Property<bool>("IsSilent")
                         .HasColumnType("boolean");
@@ -638,11 +660,28 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     b.Property<int>("PutOffFlags")
                         .HasColumnType("integer");
 
+                    b.Property<int?>("ScatterGrams")
+                        .HasColumnType("integer");
+
+                    b.Property<int?>("SlopeBandGramsPerWeek")
+                        .HasColumnType("integer");
+
+                    b.Property<int?>("SlopeGramsPerWeek")
+                        .HasColumnType("integer");
+
                     b.Property<DateOnly?>("TargetFrom")
                         .HasColumnType("date");
 
                     b.Property<int?>("TargetGrams")
                         .HasColumnType("integer");
+
+                    b.Property<DateOnly?>("TrendDay")
+                        .HasColumnType("date");
+
+                    b.Property<string>("TrendLine")
+                        .IsRequired()
+                        .HasMaxLength(1000)
+                        .HasColumnType("character varying(1000)");
 
                     b.Property<int>("Version")
                         .HasColumnType("integer");

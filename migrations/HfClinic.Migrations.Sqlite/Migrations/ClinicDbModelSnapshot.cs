@@ -562,6 +562,19 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<bool>("CheckFailed")
                         .HasColumnType("INTEGER");
 
+                    b.Property<int?>("ExcessErrorGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("ExcessGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("FluidGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<decimal?>("FluidScore")
+                        .HasPrecision(8, 3)
+                        .HasColumnType("TEXT");
+
                     b.Property<int?>("Gain1Day")
                         .HasColumnType("INTEGER");
 
@@ -572,6 +585,15 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("HeldReadings")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsFalling")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsLearning")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsRising")
                         .HasColumnType("INTEGER");
 
                     b.Property<bool>("IsSilent")
@@ -621,11 +643,28 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<int>("PutOffFlags")
                         .HasColumnType("INTEGER");
 
+                    b.Property<int?>("ScatterGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("SlopeBandGramsPerWeek")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("SlopeGramsPerWeek")
+                        .HasColumnType("INTEGER");
+
                     b.Property<DateOnly?>("TargetFrom")
                         .HasColumnType("TEXT");
 
                     b.Property<int?>("TargetGrams")
                         .HasColumnType("INTEGER");
+
+                    b.Property<DateOnly?>("TrendDay")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("TrendLine")
+                        .IsRequired()
+                        .HasMaxLength(1000)
+                        .HasColumnType("TEXT");
 
                     b.Property<int>("Version")
                         .HasColumnType("INTEGER");

@@ -18,6 +18,7 @@ internal static class PutOffUntilVisit
         [
             .. Then.LookDaily(-3, -2),
             Then.PutOff(-2, new(9, 50), "volume.gain-7-days", 5, "No symptoms on the phone; seen at the clinic in a few days."),
+            Then.PutOff(-2, new(9, 51), "volume.fluid-gain", 5, "No symptoms on the phone; seen at the clinic in a few days."),
             Then.Look(-1),
         ],
     };

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using HfClinic.Clinical.Values;
+using HfClinic.Clinical.Weights;
 
 namespace HfClinic.Clinical.Picture;
 
@@ -8,6 +9,8 @@ namespace HfClinic.Clinical.Picture;
 /// </summary>
 public sealed record PatientPicture
 {
+    private readonly PictureTrend _trend = new();
+
     /// <summary>The clinic day the picture stands for, in the clinic's time zone.</summary>
     public required DateOnly AsOf { get; init; }
 
@@ -83,4 +86,7 @@ public sealed record PatientPicture
 
     /// <summary>The target weight that holds on <see cref="AsOf"/>, or null when none was set.</summary>
     public TargetWeight? TargetWeight => TargetWeights.LastOrDefault(target => target.From <= AsOf);
+
+    /// <summary>The individual weight trend up to <see cref="AsOf"/>; computed when first asked for, and kept.</summary>
+    public TrendHistory Trend => _trend.Of(this);
 }

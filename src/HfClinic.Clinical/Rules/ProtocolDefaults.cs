@@ -9,7 +9,7 @@ public static class ProtocolDefaults
     private const string File = "protocol.json";
 
     private static readonly ImmutableHashSet<string> Units =
-        ["g", "kg", "%", "days", "hours", "mmHg", "beats/min", "mmol/L", "µmol/L", "ng/mL", "mL/min/1.73 m²"];
+        ["g", "g/day", "kg", "%", "days", "hours", "mmHg", "beats/min", "mmol/L", "µmol/L", "ng/mL", "mL/min/1.73 m²", "sd"];
 
     /// <summary>Reads the embedded table as protocol version 0, profile ESC.</summary>
     /// <exception cref="TableFaultException">The table is faulty.</exception>

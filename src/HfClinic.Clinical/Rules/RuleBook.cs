@@ -18,10 +18,16 @@ public static class RuleBook
         new GainInOneDayTwoPounds(),
         new LossInSevenDays(),
         new AboveTarget(),
+        new FluidGain(),
+        new EarlyFluidGain(),
+        new AboveTargetTrend(),
+        new FluidLoss(),
+        new WeightLossOverMonths(),
         new SymptomsReported(),
         new NoWeight(),
         new HeldReadingWaiting(),
         new TargetWeightOld(),
+        new TargetWeightStale(),
     ];
 
     private static readonly FrozenDictionary<string, IRule> ById = All.ToFrozenDictionary(rule => rule.Id, StringComparer.Ordinal);

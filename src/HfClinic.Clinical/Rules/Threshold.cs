@@ -17,7 +17,7 @@ public enum Comparison
 /// <param name="Key">Stable key: "weight.gain-3-days".</param>
 /// <param name="Title">Its name on screen.</param>
 /// <param name="Value">In <paramref name="Unit"/>.</param>
-/// <param name="Unit">One of the units known to <see cref="ProtocolDefaults"/>: g, %, days, mmHg, mmol/L …</param>
+/// <param name="Unit">One of the units known to <see cref="ProtocolDefaults"/>: g, %, days, mmHg, mmol/L …; "sd" is standard deviations.</param>
 /// <param name="Comparison">How a measured value is compared with it.</param>
 /// <param name="IsOn">Whether the clinic uses it.</param>
 /// <param name="Lowest">Lower end of the range a clinic may set.</param>

@@ -67,6 +67,9 @@ public readonly record struct TrendDay
     /// <summary>Standard error of <see cref="Excess"/>, kg.</summary>
     public double ExcessError => Math.Sqrt(State.ExpectedVariance);
 
+    /// <summary>Half the width of the 95% interval of the weight without weighing noise, and so of the excess, kg.</summary>
+    public double Band => Wide * ExcessError;
+
     /// <summary>Standard error of the fluid part, kg.</summary>
     public double FluidError => Math.Sqrt(State.FluidVariance);
 

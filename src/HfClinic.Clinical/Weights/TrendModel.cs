@@ -83,5 +83,9 @@ public sealed record TrendModel
     /// <param name="variance">Variance of the expected reading, kg².</param>
     public double Gate(double variance) => Math.Max(5 * Math.Sqrt(variance), SmallestGate);
 
+    /// <summary>The usual coming and going of fluid as far as readings can tell it, one standard deviation in kg.</summary>
+    /// <param name="variance">Variance of the fluid part after the day's reading, kg².</param>
+    public double UsualFluid(double variance) => Math.Sqrt(Math.Max(FluidVariance - variance, 0.04 * FluidVariance));
+
     private static double Square(double value) => value * value;
 }

@@ -9,8 +9,12 @@ namespace HfClinic.Clinical.Weights;
 /// </summary>
 public struct TrendState
 {
-    private const int LearningDays = 14;
-    private const int LearningReadings = 7;
+    /// <summary>The days within which <see cref="LearningReadings"/> accepted readings end the learning.</summary>
+    public const int LearningDays = 14;
+
+    /// <summary>How many accepted readings within <see cref="LearningDays"/> end the learning.</summary>
+    public const int LearningReadings = 7;
+
     private FluidFilter fluid;
     private SlopeFilter slope;
     private Cusum cusum;
@@ -58,7 +62,7 @@ public struct TrendState
         double used = scale.Value;
         var (use, score) = grams is int weighed ? Take(model, weighed / 1000.0, used) : (DayUse.None, double.NaN);
         NoteReading(grams is not null);
-        double fluidScore = fluid.Fluid / (used * Math.Sqrt(Math.Max(model.FluidVariance - fluid.FluidVariance, 0.04 * model.FluidVariance)));
+        double fluidScore = fluid.Fluid / (used * model.UsualFluid(fluid.FluidVariance));
         var day = new TrendDay
         {
             Use = use,

@@ -46,7 +46,7 @@ public static class WeightTrend
             days[day.DayNumber - first.DayNumber] = state.Advance(model, grams, TargetOn(targets, day)?.Grams / 1000.0);
         }
 
-        return new TrendHistory(first, ImmutableCollectionsMarshal.AsImmutableArray(days));
+        return new TrendHistory(first, ImmutableCollectionsMarshal.AsImmutableArray(days)) { Model = model };
     }
 
     /// <summary>The weight a trend starts at: the target weight, or else the median of the first three weights.</summary>

@@ -1,7 +1,7 @@
-using System.Collections.Immutable;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Values;
 using HfClinic.Clinical.Weights;
+using HfClinic.Records.Flags;
 using HfClinic.Records.Readings;
 using HfClinic.Records.Settings;
 using Microsoft.EntityFrameworkCore;
@@ -11,31 +11,27 @@ namespace HfClinic.Records.DailyWeights;
 /// <summary>Reads the weights of the rows on screen.</summary>
 public sealed class WeightStripQuery(IDbContextFactory<ClinicDb> databases, ClinicClock clock)
 {
-    /// <summary>Days of weights read before the strip begins, so that the filtered line has settled where it is first seen.</summary>
-    private const int RunInDays = 28;
-
     /// <summary>Strips of the given patients over the given days, both ends included. Every patient asked for has an entry.</summary>
     public async Task<IReadOnlyDictionary<long, StripContent>> ReadAsync(
         IReadOnlyCollection<long> patients, DateOnly from, DateOnly until, CancellationToken cancellation = default)
     {
         await using var db = await databases.CreateDbContextAsync(cancellation);
-        var weights = await WeightsAsync(db, patients, from.AddDays(-RunInDays), until, cancellation);
+        var weights = await WeightsAsync(db, patients, from, until, cancellation);
         var targets = (await db.TargetWeights.AsNoTracking()
             .Where(target => patients.Contains(target.PatientId) && target.StruckOutAt == null && target.From <= until)
             .OrderBy(target => target.From).ThenBy(target => target.Id)
             .Select(target => new { target.PatientId, target.Id, target.From, target.Grams, target.ByName }).ToListAsync(cancellation))
             .ToLookup(row => row.PatientId, row => new TargetWeight(row.Id, row.From, new Weight(row.Grams), row.ByName));
         var diuretics = await DiureticSteps.ReadAsync(db, patients, from, until, cancellation);
-        return patients.Distinct().ToDictionary(patient => patient, patient =>
-        {
-            var days = DaySeries.ReadingsOf(weights[patient]);
-            return new StripContent(
-                [.. days.Where(reading => reading.Day >= from)],
-                [.. weights[patient].Where(reading => reading.Held is not null && reading.Day >= from)],
-                TargetsWithin([.. targets[patient]], from),
-                TrendOf([.. days.Select(reading => new DayWeight(reading.Day, reading.Weight.Grams))], [.. targets[patient]], from, until),
-                [.. diuretics[patient]]);
-        });
+        var lines = await db.PatientSummaries.AsNoTracking().Where(summary => patients.Contains(summary.PatientId))
+            .Select(summary => new { summary.PatientId, summary.TrendLine })
+            .ToDictionaryAsync(row => row.PatientId, row => row.TrendLine, cancellation);
+        return patients.Distinct().ToDictionary(patient => patient, patient => new StripContent(
+            DaySeries.ReadingsOf(weights[patient]),
+            [.. weights[patient].Where(reading => reading.Held is not null)],
+            TargetsWithin([.. targets[patient]], from),
+            [.. TrendLine.Read(lines.GetValueOrDefault(patient, "")).Where(point => point.Day >= from && point.Day <= until)],
+            [.. diuretics[patient]]));
     }
 
     private async Task<ILookup<long, WeightReading>> WeightsAsync(
@@ -51,19 +47,6 @@ public sealed class WeightStripQuery(IDbContextFactory<ClinicDb> databases, Clin
                 row => new WeightReading(row.Id, clock.ToLocal(row.MeasuredAt), new Weight(row.Value), row.State == ReadingState.Held
                     ? new HeldReading(row.HoldReason ?? HoldReason.Unexplained, clock.ToLocal(row.RecordedAt))
                     : null));
-
-    /// <summary>The line is not drawn past the last weight: a person who is silent has no trend.</summary>
-    private static List<TrendStep> TrendOf(
-        ImmutableArray<DayWeight> series, ImmutableArray<TargetWeight> targets, DateOnly from, DateOnly until)
-    {
-        if (series.IsEmpty)
-        {
-            return [];
-        }
-
-        var history = WeightTrend.Of(series, targets, [], series[^1].Day < until ? series[^1].Day : until);
-        return [.. history.Days.Select((day, index) => new TrendStep(history.FirstDay.AddDays(index), day.State.Expected * 1000)).Where(step => step.Day >= from)];
-    }
 
     private static List<TargetWeight> TargetsWithin(List<TargetWeight> targets, DateOnly from)
     {

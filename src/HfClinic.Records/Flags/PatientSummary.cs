@@ -33,6 +33,41 @@ public sealed class PatientSummary
 
     public DateOnly? TargetFrom { get; set; }
 
+    /// <summary>The day of the weight up to which the trend was computed; null while it learns this person's scatter.</summary>
+    public DateOnly? TrendDay { get; set; }
+
+    /// <summary>The weight with the scatter taken out, less the target, grams; null without a target.</summary>
+    public int? ExcessGrams { get; set; }
+
+    /// <summary>Standard error of <see cref="ExcessGrams"/>, also without a target.</summary>
+    public int? ExcessErrorGrams { get; set; }
+
+    public int? SlopeGramsPerWeek { get; set; }
+
+    /// <summary>Half the width of the slope's 95 % interval.</summary>
+    public int? SlopeBandGramsPerWeek { get; set; }
+
+    /// <summary>Fluid against the person's own baseline, grams; negative below it.</summary>
+    public int? FluidGrams { get; set; }
+
+    /// <summary>Fluid in standard deviations of this person's usual coming and going; for ordering, not for showing.</summary>
+    public decimal? FluidScore { get; set; }
+
+    /// <summary>Day-to-day scatter of this person's weights, one standard deviation in grams.</summary>
+    public int? ScatterGrams { get; set; }
+
+    /// <summary>Too few weights yet: only the plain limits are read.</summary>
+    public bool IsLearning { get; set; }
+
+    /// <summary>The whole 95 % interval of the slope lies above zero.</summary>
+    public bool IsRising { get; set; }
+
+    /// <summary>The whole 95 % interval of the slope lies below zero.</summary>
+    public bool IsFalling { get; set; }
+
+    /// <summary>The filtered line of the last days, for <see cref="Flags.TrendLine.Read"/>.</summary>
+    public string TrendLine { get; set; } = "";
+
     /// <summary>The most urgent open flag that is not put off; null when there is none.</summary>
     public Urgency? WorstUrgency { get; set; }
 
@@ -82,6 +117,8 @@ internal sealed class PatientSummaryMapping : IEntityTypeConfiguration<PatientSu
         summary.Property(s => s.PatientId).ValueGeneratedNever();
         summary.HasOne<Patient>().WithOne().HasForeignKey<PatientSummary>(s => s.PatientId).OnDelete(DeleteBehavior.Restrict);
         summary.HasIndex(s => new { s.OnDailyWeights, s.WorstUrgency, s.WorstSince });
+        summary.Property(s => s.FluidScore).HasPrecision(8, 3);
+        summary.Property(s => s.TrendLine).HasMaxLength(1000);
         summary.Property(s => s.OpenRules).HasMaxLength(1000);
         summary.Property(s => s.NotChecked).HasMaxLength(2000);
         summary.Property(s => s.Why).HasMaxLength(2000);

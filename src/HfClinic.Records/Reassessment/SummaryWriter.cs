@@ -4,7 +4,7 @@ using HfClinic.Clinical.Medicines;
 using HfClinic.Clinical.Picture;
 using HfClinic.Clinical.Rules;
 using HfClinic.Clinical.Rules.Volume;
-
+using HfClinic.Clinical.Values;
 using HfClinic.Clinical.Weights;
 using HfClinic.Records.Contacts;
 using HfClinic.Records.Flags;
@@ -32,6 +32,7 @@ public sealed class SummaryWriter(ClinicClock clock)
         summary.OnDailyWeights = patient.WeighsAtHome && patient.LeftOn is null;
         summary.AsOf = scope.Today;
         WriteWeights(summary, picture);
+        WriteTrend(summary, picture);
         WriteFlags(summary, flags, findings, scope.Today);
         summary.LoopDiuretic = LoopDiureticOn(picture);
         await WriteContactsAsync(db, summary, patient.Id, cancellation);
@@ -52,6 +53,28 @@ public sealed class SummaryWriter(ClinicClock clock)
         summary.HeldReadings = picture.Weights.Count(weight => weight.Held is not null);
     }
 
+    private static void WriteTrend(PatientSummary summary, PatientPicture picture)
+    {
+        var latest = WeightSummary.Of(picture).Latest?.Day;
+        var day = latest is { } known ? picture.Trend.On(known) : null;
+        var usable = day is { Learning: false } ? day : null;
+        var (perWeek, low, high) = usable?.WeeklySlope ?? default;
+        summary.IsLearning = day is { Learning: true };
+        summary.TrendDay = usable is null ? null : latest;
+        summary.ExcessGrams = Grams(usable?.State.Expected) - picture.TargetWeight?.Weight.Grams;
+        summary.ExcessErrorGrams = Grams(usable?.ExcessError);
+        summary.SlopeGramsPerWeek = usable is null ? null : Grams(perWeek);
+        summary.SlopeBandGramsPerWeek = usable is null ? null : Grams(high - perWeek);
+        summary.FluidGrams = Grams(usable?.State.Fluid);
+        summary.FluidScore = usable is { } trend ? decimal.Round((decimal)trend.FluidScore, 3) : null;
+        summary.ScatterGrams = usable is null ? null : Grams(picture.Trend.ScatterOn(latest!.Value));
+        summary.IsRising = low > 0;
+        summary.IsFalling = high < 0;
+        summary.TrendLine = TrendLine.Write(picture);
+    }
+
+    private static int? Grams(double? kilograms) => kilograms is { } known ? (int)Math.Round(known * 1000) : null;
+
     private static void WriteFlags(
         PatientSummary summary, IReadOnlyCollection<Flag> flags, IReadOnlyCollection<Finding> findings, DateOnly today)
     {
@@ -67,7 +90,8 @@ public sealed class SummaryWriter(ClinicClock clock)
         summary.Why = Cut(string.Join(Between, onList.Select(flag => flag.Statement).Concat(failed.Select(finding => finding.Statement))));
         summary.NotChecked = Cut(string.Join(Between, findings
             .Where(finding => finding.Outcome is Outcome.CannotTell or Outcome.CouldNotBeChecked)
-            .Select(finding => $"{RuleBook.TitleOf(finding.RuleId)}: {finding.Missing}")));
+            .GroupBy(finding => finding.Missing, StringComparer.Ordinal)
+            .Select(missing => $"{Wording.List([.. missing.Select(finding => RuleBook.TitleOf(finding.RuleId)).Distinct()])}: {missing.Key}")));
         var worst = onList.Select(flag => (Urgency?)flag.Urgency).Concat(failed.Select(_ => (Urgency?)Urgency.ThisWeek)).Max();
         summary.WorstUrgency = worst;
         summary.WorstSince = onList.Where(flag => flag.Urgency == worst).Select(flag => (DateTime?)flag.RaisedAt).Min();

@@ -20,13 +20,16 @@ internal sealed class BareDailyList(TestClinic clinic, DateOnly today)
 
     private static readonly Columns RowColumns = new(
         "p.Id:whole p.ClinicNumber:text p.FamilyName:text p.GivenName:text p.BirthDate:day p.Sex:whole p.Phone:text "
-        + "s.PatientId:whole s.AsOf:day s.CheckFailed:yesno s.Gain1Day:whole s.Gain3Days:whole s.Gain7Days:whole s.HeldReadings:whole "
+        + "s.PatientId:whole s.AsOf:day s.CheckFailed:yesno s.ExcessErrorGrams:whole s.ExcessGrams:whole s.FluidGrams:whole s.FluidScore:number "
+        + "s.IsFalling:yesno s.IsLearning:yesno s.IsRising:yesno s.ScatterGrams:whole s.SlopeBandGramsPerWeek:whole s.SlopeGramsPerWeek:whole "
+        + "s.TrendDay:day s.TrendLine:text s.Gain1Day:whole s.Gain3Days:whole s.Gain7Days:whole s.HeldReadings:whole "
         + "s.IsSilent:yesno s.LastContact:text s.LastContactDay:day s.LastGrams:whole s.LastWeightAt:time s.LastWeightDay:day "
         + "s.LoopDiuretic:text s.NotChecked:text s.OnDailyWeights:yesno s.OpenFlags:whole s.OpenQuestions:whole s.OpenRules:text "
         + "s.PutOffFlags:whole s.TargetFrom:day s.TargetGrams:whole s.Version:whole s.Why:text s.WorstSince:time s.WorstUrgency:whole");
 
     private static readonly Columns ReadingColumns = new("r.Id:whole r.PatientId:whole r.MeasuredAt:time r.Value:whole r.State:whole r.HoldReason:whole r.RecordedAt:time");
     private static readonly Columns TargetColumns = new("t.PatientId:whole t.From:day t.Grams:whole");
+    private static readonly Columns LineColumns = new("s.PatientId:whole s.TrendLine:text");
     private static readonly Columns CourseColumns = new("c.PatientId:whole c.From:day c.Medicine:text c.DoseMilligrams:number c.TimesDaily:number");
 
     private bool IsPostgreSql => clinic.Engine == DatabaseEngine.PostgreSql;
@@ -58,6 +61,7 @@ internal sealed class BareDailyList(TestClinic clinic, DateOnly today)
             SELECT {TargetColumns.List} FROM "TargetWeights" t
             WHERE t."PatientId" {among} AND t."StruckOutAt" IS NULL AND t."From" <= @today ORDER BY t."From", t."Id"
             """, Read(TargetColumns));
+        await WithCommandAsync($"""SELECT {LineColumns.List} FROM "PatientSummaries" s WHERE s."PatientId" {among}""", Read(LineColumns));
         await WithCommandAsync($"""
             SELECT {CourseColumns.List} FROM "DoseCourses" c
             WHERE c."PatientId" {among} AND c."StruckOutAt" IS NULL AND c."Medicine" IN ('furosemide', 'bumetanide', 'torasemide')

@@ -12,7 +12,8 @@ public class ProtocolDefaultsTests
 
     /// <summary>
     /// 2 kg in 3 days: ESC self-care advice, quoted by Gudmundsson 2019. 5 lb in 7 days, 3 lb and 2 lb in 1 day: US and NHS
-    /// patient leaflets. All others are clinic defaults without a published figure.
+    /// patient leaflets. Creatinine +26.5 µmol/L in 48 hours or 1.5 times in 7 days: KDIGO 2012, from memory. 5 % lost in
+    /// 6 months: an article for patients. All others are clinic defaults without a published figure.
     /// </summary>
     [Theory]
     [InlineData("weight.gain-3-days", 2000, "g", Comparison.Above, true)]
@@ -31,6 +32,28 @@ public class ProtocolDefaultsTests
     [InlineData("held.worklist-hours", 24, "hours", Comparison.AtLeast, true)]
     [InlineData("symptoms.days", 3, "days", Comparison.AtMost, true)]
     [InlineData("pressure.low-systolic", 90, "mmHg", Comparison.Below, true)]
+    [InlineData("trend.fluid-gain", 2.0, "sd", Comparison.Above, true)]
+    [InlineData("trend.fluid-gain-early", 1.75, "sd", Comparison.Above, true)]
+    [InlineData("trend.fluid-loss", 2.0, "sd", Comparison.Above, true)]
+    [InlineData("trend.off-target-kg", 2000, "g", Comparison.Above, true)]
+    [InlineData("trend.off-target-percent", 2.5, "%", Comparison.Above, true)]
+    [InlineData("trend.off-target-margin", 1000, "g", Comparison.Above, true)]
+    [InlineData("trend.off-target-certainty", 1.645, "sd", Comparison.Above, true)]
+    [InlineData("trend.last-weight-days", 7, "days", Comparison.AtMost, true)]
+    [InlineData("target.stale-percent", 2, "%", Comparison.Above, true)]
+    [InlineData("target.stale-slope", 30, "g/day", Comparison.Below, true)]
+    [InlineData("loss.systolic-fall", 20, "mmHg", Comparison.AtLeast, true)]
+    [InlineData("loss.systolic-fall-below", 100, "mmHg", Comparison.Below, true)]
+    [InlineData("loss.creatinine-48-hours", 26.5, "µmol/L", Comparison.AtLeast, true)]
+    [InlineData("loss.creatinine-7-days", 50, "%", Comparison.AtLeast, true)]
+    [InlineData("loss.creatinine-baseline", 30, "%", Comparison.AtLeast, true)]
+    [InlineData("loss.sodium-low", 135, "mmol/L", Comparison.Below, true)]
+    [InlineData("loss.sodium-high", 145, "mmol/L", Comparison.Above, true)]
+    [InlineData("loss.potassium-low", 3.5, "mmol/L", Comparison.Below, true)]
+    [InlineData("loss.potassium-high", 5.5, "mmol/L", Comparison.Above, true)]
+    [InlineData("loss.blood-test-days", 14, "days", Comparison.AtMost, true)]
+    [InlineData("wasting.loss-percent", 5, "%", Comparison.AtLeast, true)]
+    [InlineData("wasting.appetite-days", 60, "days", Comparison.AtMost, true)]
     public void The_clinic_starts_with(string key, decimal value, string unit, Comparison comparison, bool isOn)
     {
         var threshold = _defaults[key];

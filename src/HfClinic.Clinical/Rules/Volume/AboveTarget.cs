@@ -28,13 +28,7 @@ public sealed class AboveTarget : VolumeRule
 
         return picture.TargetWeight is not { } target ? [CannotTell("no target weight")]
             : WeightSummary.Of(picture).Latest is not { } latest ? [CannotTell("no accepted weight")]
-            : [Compare(latest, target, Larger(mass, percent, target), picture, protocol)];
-    }
-
-    private static Threshold Larger(Threshold mass, Threshold percent, TargetWeight target)
-    {
-        var share = percent with { Value = percent.Value * target.Weight.Grams / 100 };
-        return !percent.IsOn || (mass.IsOn && mass.Value >= share.Value) ? mass : share;
+            : [Compare(latest, target, TargetBound.Larger(mass, percent, target.Weight), picture, protocol)];
     }
 
     private Finding Compare(WeightReading latest, TargetWeight target, Threshold limit, PatientPicture picture, ClinicProtocol protocol)

@@ -27,15 +27,17 @@ internal static class RecentSigns
     /// <summary>The lowest systolic pressure below the protocol's limit, in words, or nothing.</summary>
     public static IEnumerable<(string Words, Evidence Evidence)> LowSystolic(PatientPicture picture, ClinicProtocol protocol)
     {
-        var lowest = picture.Vitals
-            .Where(vital => vital.Kind == ReadingKind.SystolicPressure && IsRecent(vital.Day, picture, protocol))
-            .MinBy(vital => vital.Value);
-        if (lowest is not null && protocol["pressure.low-systolic"].IsMetBy(lowest.Value))
+        if (LowestSystolic(picture, protocol) is { } lowest && protocol["pressure.low-systolic"].IsMetBy(lowest.Value))
         {
             var value = lowest.Value.ToString(CultureInfo.InvariantCulture);
             yield return ($"systolic {value}", new Evidence("Systolic pressure", $"{value} mmHg", lowest.Day, lowest.Id));
         }
     }
+
+    /// <summary>The lowest systolic pressure of those days, or null.</summary>
+    public static VitalReading? LowestSystolic(PatientPicture picture, ClinicProtocol protocol) => picture.Vitals
+        .Where(vital => vital.Kind == ReadingKind.SystolicPressure && IsRecent(vital.Day, picture, protocol))
+        .MinBy(vital => vital.Value);
 
     private static bool IsRecent(DateOnly day, PatientPicture picture, ClinicProtocol protocol) =>
         protocol[DaysBack].IsMetBy(picture.AsOf.DayNumber - day.DayNumber);

@@ -11,7 +11,7 @@ using Microsoft.EntityFrameworkCore.Storage.ValueConversion;
 namespace HfClinic.Migrations.Sqlite.Migrations
 {
     [DbContext(typeof(ClinicDb))]
-    [Migration("20261201132236_Initial")]
+    [Migration("20261201141823_Initial")]
     partial class Initial
     {
         /// <inheritdoc />
@@ -324,10 +324,16 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<DateTime?>("FinishedAt")
                         .HasColumnType("TEXT");
 
+                    b.Property<DateTime>("HeartbeatAt")
+                        .HasColumnType("TEXT");
+
                     b.Property<int>("Held")
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("Kind")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int>("Later")
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("Lines")
@@ -339,11 +345,20 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<DateTime>("StartedAt")
                         .HasColumnType("TEXT");
 
+                    b.Property<int>("State")
+                        .HasColumnType("INTEGER");
+
                     b.HasKey("Id");
 
                     b.HasIndex("StartedAt");
 
-                    b.ToTable("ImportRuns");
+                    b.HasIndex("State")
+                        .HasFilter("\"State\" = 1");
+
+                    b.ToTable("ImportRuns", t =>
+                        {
+                            t.HasCheckConstraint("CK_ImportRuns_State", "\"State\" BETWEEN 1 AND 4");
+                        });
                 });
 
             modelBuilder.Entity("HfClinic.Records.Flags.Flag", b =>
@@ -550,6 +565,19 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<bool>("CheckFailed")
                         .HasColumnType("INTEGER");
 
+                    b.Property<int?>("ExcessErrorGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("ExcessGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("FluidGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<decimal?>("FluidScore")
+                        .HasPrecision(8, 3)
+                        .HasColumnType("TEXT");
+
                     b.Property<int?>("Gain1Day")
                         .HasColumnType("INTEGER");
 
@@ -560,6 +588,15 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                         .HasColumnType("INTEGER");
 
                     b.Property<int>("HeldReadings")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsFalling")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsLearning")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("IsRising")
                         .HasColumnType("INTEGER");
 
                     b.Property<bool>("IsSilent")
@@ -609,11 +646,28 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<int>("PutOffFlags")
                         .HasColumnType("INTEGER");
 
+                    b.Property<int?>("ScatterGrams")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("SlopeBandGramsPerWeek")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<int?>("SlopeGramsPerWeek")
+                        .HasColumnType("INTEGER");
+
                     b.Property<DateOnly?>("TargetFrom")
                         .HasColumnType("TEXT");
 
                     b.Property<int?>("TargetGrams")
                         .HasColumnType("INTEGER");
+
+                    b.Property<DateOnly?>("TrendDay")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("TrendLine")
+                        .IsRequired()
+                        .HasMaxLength(1000)
+                        .HasColumnType("TEXT");
 
                     b.Property<int>("Version")
                         .HasColumnType("INTEGER");

@@ -110,10 +110,13 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     FileName = table.Column<string>(type: "TEXT", maxLength: 260, nullable: false),
                     StartedAt = table.Column<DateTime>(type: "TEXT", nullable: false),
                     FinishedAt = table.Column<DateTime>(type: "TEXT", nullable: true),
+                    State = table.Column<int>(type: "INTEGER", nullable: false),
+                    HeartbeatAt = table.Column<DateTime>(type: "TEXT", nullable: false),
                     ById = table.Column<Guid>(type: "TEXT", nullable: true),
                     ByName = table.Column<string>(type: "TEXT", maxLength: 100, nullable: false),
                     Lines = table.Column<int>(type: "INTEGER", nullable: false),
                     Accepted = table.Column<int>(type: "INTEGER", nullable: false),
+                    Later = table.Column<int>(type: "INTEGER", nullable: false),
                     Duplicates = table.Column<int>(type: "INTEGER", nullable: false),
                     Held = table.Column<int>(type: "INTEGER", nullable: false),
                     Refused = table.Column<int>(type: "INTEGER", nullable: false)
@@ -121,6 +124,7 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                 constraints: table =>
                 {
                     table.PrimaryKey("PK_ImportRuns", x => x.Id);
+                    table.CheckConstraint("CK_ImportRuns_State", "\"State\" BETWEEN 1 AND 4");
                 });
 
             migrationBuilder.CreateTable(
@@ -496,6 +500,18 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     Gain7Days = table.Column<int>(type: "INTEGER", nullable: true),
                     TargetGrams = table.Column<int>(type: "INTEGER", nullable: true),
                     TargetFrom = table.Column<DateOnly>(type: "TEXT", nullable: true),
+                    TrendDay = table.Column<DateOnly>(type: "TEXT", nullable: true),
+                    ExcessGrams = table.Column<int>(type: "INTEGER", nullable: true),
+                    ExcessErrorGrams = table.Column<int>(type: "INTEGER", nullable: true),
+                    SlopeGramsPerWeek = table.Column<int>(type: "INTEGER", nullable: true),
+                    SlopeBandGramsPerWeek = table.Column<int>(type: "INTEGER", nullable: true),
+                    FluidGrams = table.Column<int>(type: "INTEGER", nullable: true),
+                    FluidScore = table.Column<decimal>(type: "TEXT", precision: 8, scale: 3, nullable: true),
+                    ScatterGrams = table.Column<int>(type: "INTEGER", nullable: true),
+                    IsLearning = table.Column<bool>(type: "INTEGER", nullable: false),
+                    IsRising = table.Column<bool>(type: "INTEGER", nullable: false),
+                    IsFalling = table.Column<bool>(type: "INTEGER", nullable: false),
+                    TrendLine = table.Column<string>(type: "TEXT", maxLength: 1000, nullable: false),
                     WorstUrgency = table.Column<int>(type: "INTEGER", nullable: true),
                     WorstSince = table.Column<DateTime>(type: "TEXT", nullable: true),
                     Why = table.Column<string>(type: "TEXT", maxLength: 2000, nullable: false),
@@ -880,6 +896,12 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                 name: "IX_ImportRuns_StartedAt",
                 table: "ImportRuns",
                 column: "StartedAt");
+
+            migrationBuilder.CreateIndex(
+                name: "IX_ImportRuns_State",
+                table: "ImportRuns",
+                column: "State",
+                filter: "\"State\" = 1");
 
             migrationBuilder.CreateIndex(
                 name: "IX_Patients_ClinicNumber",

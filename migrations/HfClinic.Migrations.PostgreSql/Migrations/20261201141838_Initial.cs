@@ -111,10 +111,13 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     FileName = table.Column<string>(type: "character varying(260)", maxLength: 260, nullable: false),
                     StartedAt = table.Column<DateTime>(type: "timestamp with time zone", nullable: false),
                     FinishedAt = table.Column<DateTime>(type: "timestamp with time zone", nullable: true),
+                    State = table.Column<int>(type: "integer", nullable: false),
+                    HeartbeatAt = table.Column<DateTime>(type: "timestamp with time zone", nullable: false),
                     ById = table.Column<Guid>(type: "uuid", nullable: true),
                     ByName = table.Column<string>(type: "character varying(100)", maxLength: 100, nullable: false),
                     Lines = table.Column<int>(type: "integer", nullable: false),
                     Accepted = table.Column<int>(type: "integer", nullable: false),
+                    Later = table.Column<int>(type: "integer", nullable: false),
                     Duplicates = table.Column<int>(type: "integer", nullable: false),
                     Held = table.Column<int>(type: "integer", nullable: false),
                     Refused = table.Column<int>(type: "integer", nullable: false)
@@ -122,6 +125,7 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                 constraints: table =>
                 {
                     table.PrimaryKey("PK_ImportRuns", x => x.Id);
+                    table.CheckConstraint("CK_ImportRuns_State", "\"State\" BETWEEN 1 AND 4");
                 });
 
             migrationBuilder.CreateTable(
@@ -497,6 +501,18 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     Gain7Days = table.Column<int>(type: "integer", nullable: true),
                     TargetGrams = table.Column<int>(type: "integer", nullable: true),
                     TargetFrom = table.Column<DateOnly>(type: "date", nullable: true),
+                    TrendDay = table.Column<DateOnly>(type: "date", nullable: true),
+                    ExcessGrams = table.Column<int>(type: "integer", nullable: true),
+                    ExcessErrorGrams = table.Column<int>(type: "integer", nullable: true),
+                    SlopeGramsPerWeek = table.Column<int>(type: "integer", nullable: true),
+                    SlopeBandGramsPerWeek = table.Column<int>(type: "integer", nullable: true),
+                    FluidGrams = table.Column<int>(type: "integer", nullable: true),
+                    FluidScore = table.Column<decimal>(type: "numeric(8,3)", precision: 8, scale: 3, nullable: true),
+                    ScatterGrams = table.Column<int>(type: "integer", nullable: true),
+                    IsLearning = table.Column<bool>(type: "boolean", nullable: false),
+                    IsRising = table.Column<bool>(type: "boolean", nullable: false),
+                    IsFalling = table.Column<bool>(type: "boolean", nullable: false),
+                    TrendLine = table.Column<string>(type: "character varying(1000)", maxLength: 1000, nullable: false),
                     WorstUrgency = table.Column<int>(type: "integer", nullable: true),
                     WorstSince = table.Column<DateTime>(type: "timestamp with time zone", nullable: true),
                     Why = table.Column<string>(type: "character varying(2000)", maxLength: 2000, nullable: false),
@@ -881,6 +897,12 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                 name: "IX_ImportRuns_StartedAt",
                 table: "ImportRuns",
                 column: "StartedAt");
+
+            migrationBuilder.CreateIndex(
+                name: "IX_ImportRuns_State",
+                table: "ImportRuns",
+                column: "State",
+                filter: "\"State\" = 1");
 
             migrationBuilder.CreateIndex(
                 name: "IX_Patients_ClinicNumber",
