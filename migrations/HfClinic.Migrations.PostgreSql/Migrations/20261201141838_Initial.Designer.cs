@@ -588,6 +588,9 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     b.Property<int?>("ExcessGrams")
                         .HasColumnType("integer");
 
+                    b.Property<int?>("FluidBandGrams")
+                        .HasColumnType("integer");
+
                     b.Property<int?>("FluidGrams")
                         .HasColumnType("integer");
 

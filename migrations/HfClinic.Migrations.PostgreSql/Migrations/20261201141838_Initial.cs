@@ -506,6 +506,7 @@ namespace HfClinic.Migrations.PostgreSql.Migrations
                     ExcessErrorGrams = table.Column<int>(type: "integer", nullable: true),
                     SlopeGramsPerWeek = table.Column<int>(type: "integer", nullable: true),
                     SlopeBandGramsPerWeek = table.Column<int>(type: "integer", nullable: true),
+                    FluidBandGrams = table.Column<int>(type: "integer", nullable: true),
                     FluidGrams = table.Column<int>(type: "integer", nullable: true),
                     FluidScore = table.Column<decimal>(type: "numeric(8,3)", precision: 8, scale: 3, nullable: true),
                     ScatterGrams = table.Column<int>(type: "integer", nullable: true),

@@ -571,6 +571,9 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     b.Property<int?>("ExcessGrams")
                         .HasColumnType("INTEGER");
 
+                    b.Property<int?>("FluidBandGrams")
+                        .HasColumnType("INTEGER");
+
                     b.Property<int?>("FluidGrams")
                         .HasColumnType("INTEGER");
 

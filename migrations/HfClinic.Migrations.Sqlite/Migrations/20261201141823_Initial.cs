@@ -505,6 +505,7 @@ namespace HfClinic.Migrations.Sqlite.Migrations
                     ExcessErrorGrams = table.Column<int>(type: "INTEGER", nullable: true),
                     SlopeGramsPerWeek = table.Column<int>(type: "INTEGER", nullable: true),
                     SlopeBandGramsPerWeek = table.Column<int>(type: "INTEGER", nullable: true),
+                    FluidBandGrams = table.Column<int>(type: "INTEGER", nullable: true),
                     FluidGrams = table.Column<int>(type: "INTEGER", nullable: true),
                     FluidScore = table.Column<decimal>(type: "TEXT", precision: 8, scale: 3, nullable: true),
                     ScatterGrams = table.Column<int>(type: "INTEGER", nullable: true),

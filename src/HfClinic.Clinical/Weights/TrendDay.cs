@@ -73,6 +73,9 @@ public readonly record struct TrendDay
     /// <summary>Standard error of the fluid part, kg.</summary>
     public double FluidError => Math.Sqrt(State.FluidVariance);
 
+    /// <summary>Half the width of the 95% interval of the fluid part, kg.</summary>
+    public double FluidBand => Wide * FluidError;
+
     /// <summary>Slope in kg per week with its 95% interval.</summary>
     public (double PerWeek, double Low, double High) WeeklySlope => (
         7 * Trend.Slope,

@@ -20,5 +20,6 @@ public enum Capability
     Book,
     ManagePeople,
     ReadAudit,
+    ReadClinicFigures,
     ChangeSettings,
 }

@@ -17,8 +17,9 @@ public static class Permissions
         [
             ReadCharts, RecordReadings, DecideReadings, EnrolPatients, RecordContacts, AnswerFlags, AskQuestions,
             AnswerQuestions, SetTargetWeight, SetThresholds, ChangeMedicines, RecordBloodTests, RecordVisits, Book,
+            ReadClinicFigures,
         ],
-        [ClinicRole.Coordinator] = [ReadCharts, ImportFiles, EnrolPatients, RecordContacts, AskQuestions, Book],
+        [ClinicRole.Coordinator] = [ReadCharts, ImportFiles, EnrolPatients, RecordContacts, AskQuestions, Book, ReadClinicFigures],
         [ClinicRole.Administrator] = [ManagePeople, ReadAudit, ChangeSettings, ImportFiles],
     }.ToFrozenDictionary(entry => entry.Key, entry => entry.Value.ToFrozenSet());
 

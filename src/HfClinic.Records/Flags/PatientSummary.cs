@@ -50,6 +50,9 @@ public sealed class PatientSummary
     /// <summary>Fluid against the person's own baseline, grams; negative below it.</summary>
     public int? FluidGrams { get; set; }
 
+    /// <summary>Half the width of the 95 % interval of <see cref="FluidGrams"/>.</summary>
+    public int? FluidBandGrams { get; set; }
+
     /// <summary>Fluid in standard deviations of this person's usual coming and going; for ordering, not for showing.</summary>
     public decimal? FluidScore { get; set; }
 

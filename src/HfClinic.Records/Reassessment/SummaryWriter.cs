@@ -66,6 +66,7 @@ public sealed class SummaryWriter(ClinicClock clock)
         summary.SlopeGramsPerWeek = usable is null ? null : Grams(perWeek);
         summary.SlopeBandGramsPerWeek = usable is null ? null : Grams(high - perWeek);
         summary.FluidGrams = Grams(usable?.State.Fluid);
+        summary.FluidBandGrams = Grams(usable?.FluidBand);
         summary.FluidScore = usable is { } trend ? decimal.Round((decimal)trend.FluidScore, 3) : null;
         summary.ScatterGrams = usable is null ? null : Grams(picture.Trend.ScatterOn(latest!.Value));
         summary.IsRising = low > 0;

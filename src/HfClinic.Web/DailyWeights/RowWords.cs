@@ -76,11 +76,26 @@ public sealed class RowWords(DailyListRow row, DateOnly today, WeightUnit unit, 
         $"{Or(Person.Summary.LoopDiuretic, "no loop diuretic")} · {Or(Person.Summary.LastContact, "no contact on record")}" +
         (Person.Summary.OpenQuestions > 0 ? $" · {Wording.Count(Person.Summary.OpenQuestions, "open question", "open questions")}" : "");
 
-    /// <summary>"symptoms reported": the names of the rules that could not be read for want of data; empty when all could.</summary>
-    public string CannotTell => string.Join(", ", Person.Summary.NotChecked.Split("; ", StringSplitOptions.RemoveEmptyEntries)
-        .Select(missing => missing.Split(": ")[0].ToLowerInvariant()).Distinct());
+    /// <summary>"trend still learning (3 of 7 weights in 14 days) · gain in 3 days not known"; empty when there is nothing the row does not say already.</summary>
+    public string NotKnownBeside => string.Join(" · ", Soft());
+
+    /// <summary>The statements a row has room for; the panel and paper have them all.</summary>
+    public RowStatements Statements => RowStatements.Of(row, today);
 
     private RowFlag? Met(string ruleId) => row.Flags.FirstOrDefault(flag => flag.RuleId == ruleId && flag.IsMet && !(flag.PutOffUntil > today));
+
+    private IEnumerable<string> Soft()
+    {
+        if (new OwnTrendWords(Person.Summary, row.Strip, today, unit).Learning is { } learning)
+        {
+            yield return $"trend still learning ({learning})";
+        }
+
+        foreach (var missing in NotKnown.Of(Person.Summary).Where(missing => missing.OnRow).Select(missing => missing.InShort).Distinct())
+        {
+            yield return missing;
+        }
+    }
 
     private static string Or(string text, string otherwise) => text.Length == 0 ? otherwise : text;
 }

@@ -22,7 +22,7 @@ public static class StripDrawing
             .. strip.Held.Select(held => new StripReading(held.Day, held.Weight.Grams, Held: true)),
         ],
         Targets = [.. strip.Targets.Select(target => new StripTarget(target.From, target.Weight.Grams))],
-        Trend = [.. strip.Trend.Select(step => new StripTrendPoint(step.Day, step.Grams))],
+        Trend = [.. strip.Trend.Select(step => new StripTrendPoint(step.Day, step.Grams, step.LowGrams, step.HighGrams))],
         DiureticChanges = [.. strip.Diuretics.Select(step => new StripChange(step.Day, step.Words))],
     };
 }

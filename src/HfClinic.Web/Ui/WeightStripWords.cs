@@ -35,6 +35,36 @@ public static class WeightStripWords
         return string.Join(". ", sentences) + ".";
     }
 
+    /// <summary>What the marks mean, of those that are drawn.</summary>
+    public static string Legend(WeightStripData data, WeightUnit unit)
+    {
+        List<string> sentences = ["Dots: the weight of each day"];
+        if (data.Readings.Any(r => r.Held && r.Day >= data.From && r.Day <= data.To))
+        {
+            sentences.Add("Hollow: held to be checked");
+        }
+
+        var line = WeightStripLine.Of(data);
+        if (line.Count > 0)
+        {
+            var since = line[0].Points[0].Day > data.From ? $" since {Wording.ShortDay(line[0].Points[0].Day)}" : "";
+            sentences.Add($"Line: weight with the scatter taken out{since}, in its 95 % band{(line.Any(stretch => !stretch.Weighed) ? "; dashed where no weight came" : "")}");
+        }
+
+        if (MissingDays(data).Any())
+        {
+            sentences.Add("Ticks below: no weight");
+        }
+
+        var targets = WeightStripScale.StepsIn(data).ToList();
+        sentences.Add(targets.Count == 0
+            ? "No target weight is set"
+            : $"Shaded: target {Weight(targets[^1].Grams, unit)} ± {Weight(WeightStripScale.BandGrams, unit)}"
+                + $", set {Wording.Day(data.Targets.Where(t => t.From <= data.To).Max(t => t.From))}");
+        sentences.AddRange(ChangesIn(data).Select(change => $"▲ {Wording.ShortDay(change.Day)}: {change.What}"));
+        return string.Join(". ", sentences) + ".";
+    }
+
     /// <summary>Expected days with no weight of any kind, held ones included.</summary>
     public static IEnumerable<DateOnly> MissingDays(WeightStripData data)
     {

@@ -20,7 +20,7 @@ internal sealed class BareDailyList(TestClinic clinic, DateOnly today)
 
     private static readonly Columns RowColumns = new(
         "p.Id:whole p.ClinicNumber:text p.FamilyName:text p.GivenName:text p.BirthDate:day p.Sex:whole p.Phone:text "
-        + "s.PatientId:whole s.AsOf:day s.CheckFailed:yesno s.ExcessErrorGrams:whole s.ExcessGrams:whole s.FluidGrams:whole s.FluidScore:number "
+        + "s.PatientId:whole s.AsOf:day s.CheckFailed:yesno s.ExcessErrorGrams:whole s.ExcessGrams:whole s.FluidBandGrams:whole s.FluidGrams:whole s.FluidScore:number "
         + "s.IsFalling:yesno s.IsLearning:yesno s.IsRising:yesno s.ScatterGrams:whole s.SlopeBandGramsPerWeek:whole s.SlopeGramsPerWeek:whole "
         + "s.TrendDay:day s.TrendLine:text s.Gain1Day:whole s.Gain3Days:whole s.Gain7Days:whole s.HeldReadings:whole "
         + "s.IsSilent:yesno s.LastContact:text s.LastContactDay:day s.LastGrams:whole s.LastWeightAt:time s.LastWeightDay:day "

@@ -64,7 +64,12 @@ public class PermissionsTests
         [Capability.SetThresholds] = [ClinicRole.Prescriber],
         [Capability.ChangeMedicines] = [ClinicRole.Prescriber],
         [Capability.ManagePeople] = [ClinicRole.Administrator],
+        [Capability.ReadClinicFigures] = [ClinicRole.Prescriber, ClinicRole.Coordinator],
     };
+
+    [Fact]
+    public void Each_capability_is_held_by_the_agreed_roles_and_no_other() => Assert.All(Agreed, agreed =>
+        Assert.Equal(agreed.Value, Enum.GetValues<ClinicRole>().Where(role => Permissions.Allow([role], agreed.Key))));
 
     [Theory, BothDatabases]
     public async Task Each_verb_lets_in_the_agreed_roles_and_no_other(DatabaseEngine engine)

@@ -30,6 +30,7 @@ public class TrendOnRecordTests
         Assert.Equal(Urgency.ThisWeek, flag.Urgency);
         Assert.True(summary.FluidScore > 2);
         Assert.InRange(summary.FluidGrams!.Value, 800, 2_300);
+        Assert.InRange(summary.FluidBandGrams!.Value, 200, 1_200);
         Assert.InRange(summary.ScatterGrams!.Value, 200, 700);
         Assert.InRange(summary.ExcessGrams!.Value, 1_000, 2_300);
         Assert.InRange(summary.ExcessErrorGrams!.Value, 100, 600);

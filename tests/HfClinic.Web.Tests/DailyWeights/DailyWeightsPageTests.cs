@@ -13,6 +13,8 @@ namespace HfClinic.Web.Tests.DailyWeights;
 
 public class DailyWeightsPageTests : PageTest
 {
+    private static readonly decimal[] Gaining = [.. Enumerable.Range(0, 20).Select(day => day % 2 == 0 ? 80.2m : 79.8m), 80.2m, 80.9m, 81.7m, 82.4m];
+
     [Fact]
     public async Task Rows_stand_by_urgency_and_say_why()
     {
@@ -138,7 +140,27 @@ public class DailyWeightsPageTests : PageTest
 
         Assert.Empty(page.FindAll("td .urgency"));
         Assert.Contains("No flag does not mean no fluid.", page.Find(".panel").TextContent, StringComparison.Ordinal);
-        Assert.Contains("cannot tell", page.Find("td.cell-why").TextContent, StringComparison.Ordinal);
+        var row = page.Find("td.cell-why").TextContent;
+        Assert.Contains("trend still learning (1 of 7 weights in 14 days)", row, StringComparison.Ordinal);
+        Assert.Contains("gain in 3 days not known", row, StringComparison.Ordinal);
+        Assert.DoesNotContain("symptom", row, StringComparison.Ordinal);
+        Assert.Contains("Not asked about symptoms in the last 3 days", page.Find(".panel").TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_row_states_two_flags_of_different_kinds_and_leaves_the_others_to_the_panel_and_paper()
+    {
+        var patient = await Clinic.EnrolAtHomeAsync();
+        await Clinic.WeighDailyAsync(patient, Gaining);
+        var page = OpenPage();
+        OpenRow(page, patient);
+
+        var shown = page.Find("td.cell-why .why.unprinted").TextContent;
+        Assert.Matches(@"^Gained 2\.\d kg in 3 days\. \d\.\d kg above own baseline over \d days\.$", shown);
+        Assert.Contains("And 2 more", page.Find("td.cell-why .sub").TextContent, StringComparison.Ordinal);
+        Assert.Equal(4, page.FindAll(".panel .why-flag").Count);
+        var paper = page.Find("td.cell-why .printed").TextContent;
+        Assert.All(["Gained 2.6 kg in 7 days", "Above target by"], words => Assert.Contains(words, paper, StringComparison.Ordinal));
     }
 
     [Fact]

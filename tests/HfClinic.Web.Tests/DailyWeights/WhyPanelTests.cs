@@ -29,6 +29,33 @@ public class WhyPanelTests : PageTest
     }
 
     [Fact]
+    public async Task The_own_trend_is_told_in_amounts_with_their_doubt_and_never_as_a_score()
+    {
+        var patient = await Clinic.EnrolAtHomeAsync();
+        await Clinic.WeighDailyAsync(patient, [.. Enumerable.Range(0, 20).Select(day => day % 2 == 0 ? 80.2m : 79.8m), 80.3m, 80.8m, 81.2m, 81.6m, 82.0m, 82.3m]);
+        var page = OpenPage();
+        OpenRow(page, patient);
+
+        var words = page.Find(".panel").TextContent;
+        Assert.Matches(@"Own trend\s*\d\.\d kg of fluid above own baseline, give or take \d\.\d kg", words);
+        Assert.Matches(@"Against target\s*\d\.\d kg above with the scatter taken out, give or take \d\.\d kg", words);
+        Assert.Matches(@"Change per week\s*\+\d\.\d kg, give or take \d\.\d kg", words);
+        Assert.DoesNotContain("standard deviation", words, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_trend_that_still_learns_says_how_far_it_is()
+    {
+        var patient = await Clinic.EnrolWithGainAsync();
+        var page = OpenPage();
+        OpenRow(page, patient);
+
+        Assert.Contains(
+            "still learning this person’s own scatter: 2 of 7 weights in 14 days. Until then only the plain limits are read.",
+            page.Find(".panel").TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public async Task A_call_settles_the_ticked_flags_and_the_work_goes_on_at_the_next_row()
     {
         var first = await Clinic.EnrolWithGainAsync(ClinicSteps.Someone with { ClinicNumber = "A" });

@@ -1,4 +1,5 @@
 using Bunit;
+using HfClinic.Clinical.Values;
 using HfClinic.Web.Ui;
 
 namespace HfClinic.Web.Tests.Ui;
@@ -77,6 +78,44 @@ public class WeightStripTests : BunitContext
         Assert.Empty(strip.FindAll("circle"));
         Assert.Empty(strip.FindAll("path.strip-change"));
         Assert.Contains("28 days: none. 28 days without a weight", strip.Find("svg").GetAttribute("aria-label"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_line_is_dashed_where_no_weight_came_and_keeps_its_band()
+    {
+        WeightStripData data = new()
+        {
+            From = From,
+            To = To,
+            Readings = [.. new[] { 0, 1, 2, 6, 7 }.Select(day => new StripReading(From.AddDays(day), 71_000)), new(From.AddDays(4), 90_000, Held: true)],
+            Trend = [.. Enumerable.Range(0, 8).Select(day => new StripTrendPoint(From.AddDays(day), 71_000, 70_500, 71_500))],
+        };
+        var strip = Draw(data);
+
+        Assert.Equal([true, false, true], WeightStripLine.Of(data).Select(stretch => stretch.Weighed));
+        Assert.Equal([3, 5, 2], WeightStripLine.Of(data).Select(stretch => stretch.Points.Count));
+        Assert.Single(strip.FindAll("polyline.strip-carried"));
+        Assert.Equal(3, strip.FindAll("polyline.strip-trend").Count);
+        Assert.Equal(16, strip.Find("polygon.strip-doubt").GetAttribute("points")!.Split(' ').Length);
+    }
+
+    [Fact]
+    public void The_legend_names_the_marks_that_are_drawn()
+    {
+        WeightStripData bare = new() { From = From, To = From.AddDays(1), Readings = [new(From, 71_000), new(From.AddDays(1), 71_200)] };
+        Assert.Equal("Dots: the weight of each day. No target weight is set.", WeightStripWords.Legend(bare, WeightUnit.Kilograms));
+
+        Assert.Equal(
+            "Dots: the weight of each day. Hollow: held to be checked. Line: weight with the scatter taken out since 05 Nov, in its 95 % band; dashed where no weight came. "
+            + "Ticks below: no weight. Shaded: target 71.5 kg ± 1.0 kg, set 03 Nov 2026. ▲ 05 Nov: furosemide 40 mg daily.",
+            WeightStripWords.Legend(bare with
+            {
+                To = From.AddDays(4),
+                Readings = bare.Readings.Add(new(From.AddDays(2), 90_000, Held: true)),
+                Trend = [new(From.AddDays(1), 71_000), new(From.AddDays(2), 71_000)],
+                Targets = [new(new DateOnly(2026, 11, 3), 71_500)],
+                DiureticChanges = [new(From.AddDays(1), "furosemide 40 mg daily")],
+            }, WeightUnit.Kilograms));
     }
 
     [Fact]
