@@ -15,7 +15,8 @@ public readonly record struct Creatinine
 
     public decimal MicromolPerLitre { get; }
 
-    public decimal MgPerDl => MicromolPerLitre * MolarMass / 10_000m;
+    /// <summary>Rounded to 12 decimals, so that 0.2 mg/dL typed is 0.2 mg/dL read and stands on the right side of a limit.</summary>
+    public decimal MgPerDl => decimal.Round(MicromolPerLitre * MolarMass / 10_000m, 12);
 
     public static Creatinine FromMicromolPerLitre(decimal micromolPerLitre) => new(micromolPerLitre);
 

@@ -84,6 +84,12 @@ public class RenalTests
         == Renal.Whole(In.Value(Renal.Egfr(In.MgPerDl(Creatinine.FromMicromolPerLitre(micromol).MgPerDl), age, sex))));
 
     [Theory]
+    [InlineData("0.2")]
+    [InlineData("20")]
+    public void The_ends_of_the_accepted_range_are_accepted(string scr) =>
+        Assert.Null(Renal.Egfr(In.MgPerDl(In.Number(scr)), 60, Sex.Male).WhyNot);
+
+    [Theory]
     [InlineData("0.19", 60, "creatinine 17 µmol/L (0.19 mg/dL) is outside 0.2 to 20 mg/dL")]
     [InlineData("88", 60, "creatinine 7779 µmol/L (88.00 mg/dL) is outside 0.2 to 20 mg/dL")]
     [InlineData("1", 17, "age 17 years is outside 18 to 110 years")]
