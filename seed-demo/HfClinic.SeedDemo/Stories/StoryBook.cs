@@ -34,5 +34,6 @@ internal static class StoryBook
         PutOffUntilVisit.Story,
         OpenQuestion.Story,
         UnreadAnswer.Story,
+        .. SettledTheSameDay.Stories,
     ];
 }

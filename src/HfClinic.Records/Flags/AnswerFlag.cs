@@ -29,7 +29,7 @@ public sealed class AnswerFlag(ClinicWork work)
 
         var flags = await scope.Db.Flags
             .Where(flag => flag.PatientId == patientId && flagIds.Contains(flag.Id) && flag.State == FlagState.Open)
-            .ToListAsync(cancellation);
+            .OrderBy(flag => flag.Id).ToListAsync(cancellation);
         if (flags.Count != flagIds.Distinct().Count())
         {
             throw new ChangedMeanwhileException("One of these flags was settled meanwhile. Nothing of yours was saved; look again.");

@@ -15,7 +15,7 @@ public sealed class MarkFlagsSeen(ClinicWork work)
             await scope.TakePatientAsync(patientId, cancellation);
             var unseen = await scope.Db.Flags
                 .Where(flag => flag.PatientId == patientId && flag.State == FlagState.Open && flag.SeenAt == null)
-                .ToListAsync(cancellation);
+                .OrderBy(flag => flag.Id).ToListAsync(cancellation);
             foreach (var flag in unseen)
             {
                 (flag.SeenAt, flag.SeenByName) = (scope.Now, actor.Name);

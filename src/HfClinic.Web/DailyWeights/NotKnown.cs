@@ -8,7 +8,7 @@ namespace HfClinic.Web.DailyWeights;
 /// <summary>Something the rules could not tell of a person.</summary>
 /// <param name="What">What it is about, as the summary names it: "Gain in 3 days".</param>
 /// <param name="Why">What is missing: "no weight for 13 days".</param>
-/// <param name="OnRow">Whether the list says it too: not what nearly every row would say, nor what it says already.</param>
+/// <param name="OnRow">Whether the list says it too: not what nearly every row would say.</param>
 public sealed record NotKnown(string What, string Why, bool OnRow)
 {
     private const string Trend = "Own trend";
@@ -29,13 +29,13 @@ public sealed record NotKnown(string What, string Why, bool OnRow)
         ? Why
         : $"{char.ToLowerInvariant(What[0])}{What[1..]} not known";
 
-    /// <summary>What the summary says could not be told. A trend that still learns is not among it: it has its own words.</summary>
+    /// <summary>What the summary says could not be told. A trend that still learns or is not carried on is not among it: it has its own words.</summary>
     public static IReadOnlyList<NotKnown> Of(PatientSummary summary) =>
         [.. summary.NotChecked.Split("; ", StringSplitOptions.RemoveEmptyEntries)
             .Select(entry => entry.Split(": ", 2))
             .Select(entry => (What: IsTrend(entry[0]) ? Trend : entry[0], Why: entry.ElementAtOrDefault(1) ?? ""))
-            .Where(entry => !(summary.IsLearning && entry.What == Trend))
-            .Select(entry => new NotKnown(entry.What, entry.Why, !PanelOnly.Contains(entry.What) && !(summary.IsSilent && entry.What == Trend)))];
+            .Where(entry => !((summary.IsLearning || summary.IsSilent) && entry.What == Trend))
+            .Select(entry => new NotKnown(entry.What, entry.Why, !PanelOnly.Contains(entry.What)))];
 
     /// <summary>Several rules of the trend that lack the same are one thing to the reader.</summary>
     private static bool IsTrend(string titles)

@@ -53,6 +53,12 @@ public class DemoStoriesTests
         ("Pier", "Basil", null, [Fluid, Gain7]),
         ("Jetty", "Miriam", Urgency.Today, [Fluid, Gain3, Gain7]),
         ("Sandbar", "Cyril", Urgency.ThisWeek, [Fluid, Gain7]),
+        ("Dune", "Selma", null, []),
+        ("Reed", "Oskar", null, []),
+        ("Strand", "Beatrix", null, []),
+        ("Cairn", "Duncan", null, []),
+        ("Marsh", "Ingrid", null, []),
+        ("Skerry", "Magnus", null, []),
     ];
 
     [Theory, BothDatabases]

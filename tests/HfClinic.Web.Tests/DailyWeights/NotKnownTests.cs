@@ -18,14 +18,14 @@ public class NotKnownTests
     }
 
     [Fact]
-    public void The_rules_of_the_trend_are_one_thing_and_a_silent_row_does_not_say_it_again()
+    public void The_rules_of_the_trend_are_one_thing_and_of_the_silent_it_is_told_elsewhere()
     {
         var stored = new PatientSummary { NotChecked = $"{Trend}no weight for 13 days; {Symptoms}" };
 
         Assert.Equal(["Own trend: no weight for 13 days", "Not asked about symptoms in the last 3 days"], NotKnown.Of(stored).Select(missing => missing.Words));
         Assert.Equal([true, false], NotKnown.Of(stored).Select(missing => missing.OnRow));
         stored.IsSilent = true;
-        Assert.Equal([false, false], NotKnown.Of(stored).Select(missing => missing.OnRow));
+        Assert.Equal(["Not asked about symptoms in the last 3 days"], NotKnown.Of(stored).Select(missing => missing.Words));
     }
 
     [Fact]
