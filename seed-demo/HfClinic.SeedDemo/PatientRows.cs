@@ -38,18 +38,34 @@ internal sealed class PatientRows(WorkScope scope, DemoDays days, Team team)
     {
         scope.Db.TargetWeights.AddRange(patient.Targets.Select(target => new TargetWeight
         {
-            PatientId = id, From = days.Date(target.Day), Grams = target.Weight.Grams, Reason = target.Reason,
-            ById = team.Cardiologist.UserId, ByName = team.Cardiologist.Name, RecordedAt = days.Utc(target.Day, VisitTime),
+            PatientId = id,
+            From = days.Date(target.Day),
+            Grams = target.Weight.Grams,
+            Reason = target.Reason,
+            ById = team.Cardiologist.UserId,
+            ByName = team.Cardiologist.Name,
+            RecordedAt = days.Utc(target.Day, VisitTime),
         }));
         scope.Db.SymptomReports.AddRange(patient.Symptoms.Select(told => new SymptomReport
         {
-            PatientId = id, Day = days.Date(told.Day), Symptoms = told.Symptoms, Note = told.Note, Source = ReadingSource.Phone,
-            ById = team.Nurse.UserId, ByName = team.Nurse.Name, RecordedAt = days.Utc(told.Day, VisitTime),
+            PatientId = id,
+            Day = days.Date(told.Day),
+            Symptoms = told.Symptoms,
+            Note = told.Note,
+            Source = ReadingSource.Phone,
+            ById = team.Nurse.UserId,
+            ByName = team.Nurse.Name,
+            RecordedAt = days.Utc(told.Day, VisitTime),
         }));
         scope.Db.Contacts.AddRange(patient.Calls.Select(call => new Contact
         {
-            PatientId = id, At = days.Utc(call.Day, VisitTime), Day = days.Date(call.Day), Outcome = call.Outcome, Note = call.Note,
-            ById = team.Nurse.UserId, ByName = team.Nurse.Name,
+            PatientId = id,
+            At = days.Utc(call.Day, VisitTime),
+            Day = days.Date(call.Day),
+            Outcome = call.Outcome,
+            Note = call.Note,
+            ById = team.Nurse.UserId,
+            ByName = team.Nurse.Name,
         }));
         AddMedicines(id, patient);
         AddTestsAndVisits(id, patient);
@@ -97,30 +113,55 @@ internal sealed class PatientRows(WorkScope scope, DemoDays days, Team team)
 
     private void AddMedicines(long id, DemoPatient patient) => scope.Db.DoseCourses.AddRange(patient.Courses.Select(course => new DoseCourse
     {
-        PatientId = id, Medicine = course.Medicine, DoseMilligrams = course.Milligrams, TimesDaily = course.TimesDaily,
-        From = days.Date(course.From), Until = course.Until is { } until ? days.Date(until) : null, Reason = course.Reason,
+        PatientId = id,
+        Medicine = course.Medicine,
+        DoseMilligrams = course.Milligrams,
+        TimesDaily = course.TimesDaily,
+        From = days.Date(course.From),
+        Until = course.Until is { } until ? days.Date(until) : null,
+        Reason = course.Reason,
         EndedBecause = course.Until is null ? null : "Dose changed",
-        ById = team.Cardiologist.UserId, ByName = team.Cardiologist.Name, RecordedAt = days.Utc(course.From, VisitTime),
+        ById = team.Cardiologist.UserId,
+        ByName = team.Cardiologist.Name,
+        RecordedAt = days.Utc(course.From, VisitTime),
     }));
 
     private void AddTestsAndVisits(long id, DemoPatient patient)
     {
         scope.Db.BloodTests.AddRange(patient.Tests.Select(test => new BloodTest
         {
-            PatientId = id, Analyte = test.Analyte, TakenAt = days.Utc(test.Day, VisitTime), Day = days.Date(test.Day), Value = test.Value,
-            AsReported = test.Value.ToString("0.###", CultureInfo.InvariantCulture), UnitAsReported = test.Unit,
-            ById = team.Nurse.UserId, ByName = team.Nurse.Name, RecordedAt = days.Utc(test.Day, VisitTime).AddHours(5),
+            PatientId = id,
+            Analyte = test.Analyte,
+            TakenAt = days.Utc(test.Day, VisitTime),
+            Day = days.Date(test.Day),
+            Value = test.Value,
+            AsReported = test.Value.ToString("0.###", CultureInfo.InvariantCulture),
+            UnitAsReported = test.Unit,
+            ById = team.Nurse.UserId,
+            ByName = team.Nurse.Name,
+            RecordedAt = days.Utc(test.Day, VisitTime).AddHours(5),
         }));
         scope.Db.EjectionFractions.AddRange(patient.Fractions.Select(fraction => new EjectionFraction
         {
-            PatientId = id, Day = days.Date(fraction.Day), Percent = fraction.Percent, Method = "echocardiography",
-            ById = team.Cardiologist.UserId, ByName = team.Cardiologist.Name, RecordedAt = days.Utc(fraction.Day, VisitTime),
+            PatientId = id,
+            Day = days.Date(fraction.Day),
+            Percent = fraction.Percent,
+            Method = "echocardiography",
+            ById = team.Cardiologist.UserId,
+            ByName = team.Cardiologist.Name,
+            RecordedAt = days.Utc(fraction.Day, VisitTime),
         }));
         scope.Db.Visits.AddRange(patient.Visits.Select(visit => new Visit
         {
-            PatientId = id, Day = days.Date(visit.Day), Kind = visit.Kind, NyhaClass = visit.NyhaClass, Note = visit.Note,
+            PatientId = id,
+            Day = days.Date(visit.Day),
+            Kind = visit.Kind,
+            NyhaClass = visit.NyhaClass,
+            Note = visit.Note,
             Rhythm = patient.Person.HasAtrialFibrillation ? "atrial fibrillation" : "sinus rhythm",
-            ById = team.Cardiologist.UserId, ByName = team.Cardiologist.Name, RecordedAt = days.Utc(visit.Day, VisitTime),
+            ById = team.Cardiologist.UserId,
+            ByName = team.Cardiologist.Name,
+            RecordedAt = days.Utc(visit.Day, VisitTime),
         }));
     }
 }

@@ -61,30 +61,4 @@ public class NursesMorningTests(BrowserFixture browser)
         Assert.Empty(window.Faults);
         Assert.Empty(office.Faults);
     }
-
-    [Theory]
-    [InlineData("/daily-weights", ClinicRole.Nurse)]
-    [InlineData("/patients", ClinicRole.Nurse)]
-    [InlineData("/patients/1", ClinicRole.Nurse)]
-    [InlineData("/questions", ClinicRole.Prescriber)]
-    [InlineData("/readings-in", ClinicRole.Coordinator)]
-    [InlineData("/people", ClinicRole.Administrator)]
-    [InlineData("/record-of-access", ClinicRole.Administrator)]
-    [InlineData("/patients/4711", ClinicRole.Nurse)]
-    [InlineData("/no-such-page", ClinicRole.Nurse)]
-    public async Task Every_page_is_open_to_everybody_light_dark_and_small(string address, ClinicRole role)
-    {
-        await using var app = await ClinicApp.StartAsync(DatabaseEngine.Sqlite, Mornings.ThreeGains, new ShiftedClock(TestClinic.UsualStart));
-        foreach (var (size, scheme) in new[] { (WindowSize.Desk, ColorScheme.Light), (WindowSize.Phone, ColorScheme.Dark) })
-        {
-            await using var window = await browser.OpenAsync(app, size, scheme);
-            await window.Page.SignInAsync(role);
-            await window.Page.GotoAsync(address);
-            await Expect(window.Page.Locator("h1").First).ToBeVisibleAsync();
-            await Expect(window.Page.Locator(".loading")).ToHaveCountAsync(0);
-            await window.Page.ShouldHaveNoSeriousBarriersAsync();
-            var wider = await window.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
-            Assert.True(wider <= 0, $"{address} is {wider} px wider than the {size.Width} px window.");
-        }
-    }
 }

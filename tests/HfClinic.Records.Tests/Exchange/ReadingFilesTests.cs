@@ -164,8 +164,14 @@ public class ReadingFilesTests
             await db.SaveChangesAsync(TestContext.Current.CancellationToken);
             db.Add(new Reading
             {
-                PatientId = patient.Id, Kind = ReadingKind.Weight, Value = 72_000, Day = new(2026, 3, 31), MeasuredAt = new(2026, 3, 31, 6, 0, 0, DateTimeKind.Utc),
-                Source = ReadingSource.HomeFile, ImportId = run.Id, RecordedAt = run.HeartbeatAt,
+                PatientId = patient.Id,
+                Kind = ReadingKind.Weight,
+                Value = 72_000,
+                Day = new(2026, 3, 31),
+                MeasuredAt = new(2026, 3, 31, 6, 0, 0, DateTimeKind.Utc),
+                Source = ReadingSource.HomeFile,
+                ImportId = run.Id,
+                RecordedAt = run.HeartbeatAt,
             });
             await db.SaveChangesAsync(TestContext.Current.CancellationToken);
         }

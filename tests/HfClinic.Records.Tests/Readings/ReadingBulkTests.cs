@@ -39,8 +39,13 @@ public class ReadingBulkTests
         };
         var sparse = new Reading
         {
-            PatientId = patient, Kind = ReadingKind.HeartRate, MeasuredAt = Morning, Day = full.Day, Value = 71,
-            Source = ReadingSource.Phone, RecordedAt = Morning,
+            PatientId = patient,
+            Kind = ReadingKind.HeartRate,
+            MeasuredAt = Morning,
+            Day = full.Day,
+            Value = 71,
+            Source = ReadingSource.Phone,
+            RecordedAt = Morning,
         };
         Assert.Equal(2, await InsertAsync(clinic, [full, sparse]));
 

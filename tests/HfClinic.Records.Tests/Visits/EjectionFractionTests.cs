@@ -26,8 +26,12 @@ public class EjectionFractionTests
         await using var db = clinic.OpenDb();
         db.EjectionFractions.Add(new EjectionFraction
         {
-            PatientId = patient, Day = new DateOnly(2026, 2, 1), Percent = (decimal)percent, Method = "echocardiography",
-            RecordedAt = new DateTime(2026, 2, 1, 9, 0, 0, DateTimeKind.Utc), ByName = "Test Prescriber",
+            PatientId = patient,
+            Day = new DateOnly(2026, 2, 1),
+            Percent = (decimal)percent,
+            Method = "echocardiography",
+            RecordedAt = new DateTime(2026, 2, 1, 9, 0, 0, DateTimeKind.Utc),
+            ByName = "Test Prescriber",
         });
         var refusal = await Record.ExceptionAsync(() => db.SaveChangesAsync(TestContext.Current.CancellationToken));
         Assert.Equal(accepted, refusal is null);

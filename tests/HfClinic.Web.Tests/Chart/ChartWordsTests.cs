@@ -40,7 +40,11 @@ public class ChartWordsTests
     {
         Reading Of(ReadingState state, long? corrects = null) => new()
         {
-            Kind = ReadingKind.Weight, Value = 155_000, State = state, SupersedesId = corrects, HoldReason = HoldReason.PoundsTakenAsKilograms,
+            Kind = ReadingKind.Weight,
+            Value = 155_000,
+            State = state,
+            SupersedesId = corrects,
+            HoldReason = HoldReason.PoundsTakenAsKilograms,
         };
         Assert.Equal("held: 155.0 kg looks like pounds", ChartWords.State(Of(ReadingState.Held), WeightUnit.Kilograms));
         Assert.Equal("struck out", ChartWords.State(Of(ReadingState.StruckOut), WeightUnit.Kilograms));

@@ -41,7 +41,11 @@ internal sealed class ReadingsInBench : IAsyncDisposable
         var clinic = await TestClinic.StartAsync(DatabaseEngine.Sqlite);
         await clinic.Get<EnrolPatient>().RunAsync(TestClinic.As(ClinicRole.Nurse), new PatientDetails
         {
-            ClinicNumber = "T-1", FamilyName = "Test", GivenName = "One", EnrolledOn = new(2026, 1, 1), WeighsAtHome = true,
+            ClinicNumber = "T-1",
+            FamilyName = "Test",
+            GivenName = "One",
+            EnrolledOn = new(2026, 1, 1),
+            WeighsAtHome = true,
         }, TestContext.Current.CancellationToken);
         var page = new BunitContext();
         page.JSInterop.Mode = JSRuntimeMode.Loose;
