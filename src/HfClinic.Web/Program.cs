@@ -1,4 +1,5 @@
 using HfClinic.Web.Hosting;
+using Microsoft.AspNetCore.Connections;
 
 var start = StartOptions.Parse(args);
 if (start.Fault is { } fault)
@@ -26,5 +27,14 @@ if (start.Command == StartCommand.VerifyAudit)
 }
 
 app.UseClinic();
-await app.RunAsync();
+try
+{
+    await app.RunAsync();
+}
+catch (IOException taken) when (taken.InnerException is AddressInUseException)
+{
+    await Console.Error.WriteLineAsync($"{taken.Message} Is the program running already? Name another address with --urls http://127.0.0.1:8080");
+    return 2;
+}
+
 return 0;

@@ -50,7 +50,7 @@ public static class ClinicHost
             app.UseExceptionHandler("/fault", createScopeForErrors: true);
         }
 
-        app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
+        app.UsePlainAnswers();
         app.UsePageSafety();
         app.Use(FirstRunGate.Pass);
         app.UseRateLimiter();

@@ -1,8 +1,11 @@
+using HfClinic.Records;
 using HfClinic.Records.Audit;
 using HfClinic.Records.Settings;
 using HfClinic.Records.Storage;
 using HfClinic.SeedDemo;
 using HfClinic.Web.SignIn;
+using HfClinic.Web.Ui;
+using Microsoft.EntityFrameworkCore;
 
 namespace HfClinic.Web.Hosting;
 
@@ -10,7 +13,7 @@ namespace HfClinic.Web.Hosting;
 public static class ClinicStart
 {
     /// <summary>Prepares the database.</summary>
-    /// <exception cref="CannotStartException">The database is not the kind the command asks for.</exception>
+    /// <exception cref="CannotStartException">The database does not answer, or is not the kind the command asks for.</exception>
     public static async Task PrepareClinicAsync(this WebApplication app, StartOptions start)
     {
         if (start is { Command: StartCommand.Demo, Fresh: true })
@@ -18,13 +21,13 @@ public static class ClinicStart
             StartOver(app);
         }
 
-        await app.Services.GetRequiredService<ClinicStorage>().PrepareAsync(CancellationToken.None);
+        await OpenAsync(app);
         var settings = app.Services.GetRequiredService<CurrentSettings>();
         var isDemo = start.Command == StartCommand.Demo;
         if (isDemo && settings.OrNull is null)
         {
             app.Logger.LogInformation("Making the demo clinic: {Patients} invented patients.", start.DemoPatients);
-            await DemoClinic.SeedAsync(app.Services, start.DemoPatients, CancellationToken.None);
+            await SeedAsync(app, start.DemoPatients);
         }
 
         if (settings.OrNull is { } known && start.Command != StartCommand.VerifyAudit && known.IsDemo != isDemo)
@@ -32,6 +35,17 @@ public static class ClinicStart
             throw new CannotStartException(known.IsDemo
                 ? "This database holds the invented demo clinic, so it cannot be run as a real one. Start with 'demo', or name another database in ConnectionStrings__Clinic."
                 : "This database holds a real clinic's record, so no demo data go into it. Start without 'demo', or name another database in ConnectionStrings__Clinic.");
+        }
+
+        if (isDemo && !await IsWholeDemoAsync(app))
+        {
+            throw new CannotStartException("The demo clinic was not finished when it was made. Start it over with: demo --fresh");
+        }
+
+        if (settings.OrNull is null && start.Command == StartCommand.VerifyAudit)
+        {
+            throw new CannotStartException(
+                $"There is no clinic in this database, so there is no record of access to check. Name the database in ConnectionStrings__Clinic, or its folder in {DataFolder.Setting}.");
         }
 
         if (settings.OrNull is null && start.Command == StartCommand.Serve)
@@ -50,6 +64,39 @@ public static class ClinicStart
             ? $"The record of access holds: {verdict.Lines} lines, each linked to the one before."
             : $"The record of access does NOT hold. {verdict.Fault} Lines before it: {verdict.Lines}.");
         return verdict.Fault is null ? 0 : 1;
+    }
+
+    private static async Task OpenAsync(WebApplication app)
+    {
+        try
+        {
+            await app.Services.GetRequiredService<ClinicStorage>().PrepareAsync(CancellationToken.None);
+        }
+        catch (Exception fault) when (DatabaseAway.Is(fault) || fault is ArgumentException or IOException or UnauthorizedAccessException)
+        {
+            var said = fault is ArgumentException ? fault.Message : fault.GetBaseException().Message;
+            throw new CannotStartException(
+                $"The database cannot be used. Look whether it runs and whether ConnectionStrings__Clinic, or without it the folder {DataFolder.Setting}, is right. What was said: {said}");
+        }
+    }
+
+    private static async Task SeedAsync(WebApplication app, int patients)
+    {
+        try
+        {
+            await DemoClinic.SeedAsync(app.Services, patients, CancellationToken.None);
+        }
+        catch (RefusedException refusal)
+        {
+            throw new CannotStartException(refusal.Message);
+        }
+    }
+
+    /// <summary>The last step of making the demo clinic notes its first day as swept.</summary>
+    private static async Task<bool> IsWholeDemoAsync(WebApplication app)
+    {
+        await using var db = await app.Services.GetRequiredService<IDbContextFactory<ClinicDb>>().CreateDbContextAsync();
+        return await db.SweepRuns.AnyAsync();
     }
 
     private static void StartOver(WebApplication app)

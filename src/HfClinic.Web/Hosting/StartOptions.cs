@@ -1,3 +1,5 @@
+using System.Globalization;
+
 namespace HfClinic.Web.Hosting;
 
 /// <summary>What the program is started for.</summary>
@@ -22,12 +24,15 @@ public sealed record StartOptions(StartCommand Command, bool Fresh, int DemoPati
     /// <summary>Reads the command line. A wrong word gives a <see cref="Fault"/> that says how to mend it.</summary>
     public static StartOptions Parse(string[] arguments)
     {
-        var (command, fresh, patients) = (StartCommand.Serve, false, UsualDemoPatients);
+        StartCommand? command = null;
+        var (fresh, patients) = (false, (int?)null);
         var host = new List<string>();
         for (var at = 0; at < arguments.Length; at++)
         {
             switch (arguments[at])
             {
+                case "demo" or "verify-audit" or "--verify-audit" when command is not null:
+                    return Wrong("One command at a time: demo or verify-audit.");
                 case "demo":
                     command = StartCommand.Demo;
                     break;
@@ -38,14 +43,18 @@ public sealed record StartOptions(StartCommand Command, bool Fresh, int DemoPati
                     fresh = true;
                     break;
                 case "--patients":
-                    if (++at >= arguments.Length || !int.TryParse(arguments[at], out patients) || patients is < 1 or > MostDemoPatients)
+                    if (++at >= arguments.Length || !int.TryParse(arguments[at], NumberStyles.None, CultureInfo.InvariantCulture, out var number)
+                        || number is < 1 or > MostDemoPatients)
                     {
                         return Wrong($"--patients needs a number from 1 to {MostDemoPatients}, for example: demo --patients 1000");
                     }
 
+                    patients = number;
                     break;
+                case "--urls" when at + 1 >= arguments.Length:
+                    return Wrong("--urls needs an address to listen on, for example: --urls http://127.0.0.1:8080");
                 default:
-                    if (!arguments[at].StartsWith('-') && (at == 0 || !arguments[at - 1].StartsWith("--", StringComparison.Ordinal)))
+                    if (!arguments[at].StartsWith('-') && !IsValue(arguments, at))
                     {
                         return Wrong($"'{arguments[at]}' is not a command. Use: demo [--fresh] [--patients N], verify-audit, or nothing to run the clinic.");
                     }
@@ -55,9 +64,15 @@ public sealed record StartOptions(StartCommand Command, bool Fresh, int DemoPati
             }
         }
 
-        return fresh && command != StartCommand.Demo
+        return command != StartCommand.Demo && fresh
             ? Wrong("--fresh starts the demo clinic over and goes with demo only: demo --fresh")
-            : new(command, fresh, patients, [.. host]);
+            : command != StartCommand.Demo && patients is not null
+            ? Wrong("--patients is the size of the demo clinic and goes with demo only: demo --patients 1000")
+            : new(command ?? StartCommand.Serve, fresh, patients ?? UsualDemoPatients, [.. host]);
+
+        // The word after one of the web host's settings, such as --urls http://127.0.0.1:8080, belongs to it.
+        static bool IsValue(string[] arguments, int at) => at > 0 && arguments[at - 1].StartsWith("--", StringComparison.Ordinal)
+            && !arguments[at - 1].Contains('=') && arguments[at - 1] is not ("--fresh" or "--verify-audit" or "--patients");
 
         static StartOptions Wrong(string fault) => new(StartCommand.Serve, false, UsualDemoPatients, [], fault);
     }

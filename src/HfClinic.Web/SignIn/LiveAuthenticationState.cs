@@ -1,5 +1,6 @@
 using System.Security.Claims;
 using HfClinic.Records.Access;
+using HfClinic.Web.Ui;
 using Microsoft.AspNetCore.Components.Authorization;
 using Microsoft.AspNetCore.Components.Server;
 using Microsoft.AspNetCore.Identity;
@@ -12,6 +13,8 @@ public sealed class LiveAuthenticationState(
     ILoggerFactory loggers, IServiceScopeFactory scopes, IOptions<IdentityOptions> options)
     : RevalidatingServerAuthenticationStateProvider(loggers)
 {
+    private readonly ILogger log = loggers.CreateLogger<LiveAuthenticationState>();
+
     protected override TimeSpan RevalidationInterval => TimeSpan.FromMinutes(1);
 
     protected override async Task<bool> ValidateAuthenticationStateAsync(AuthenticationState authenticationState, CancellationToken cancellationToken)
@@ -27,9 +30,21 @@ public sealed class LiveAuthenticationState(
         }
 
         await using var held = scope;
-        var users = scope.ServiceProvider.GetRequiredService<UserManager<ClinicUser>>();
-        var user = await users.GetUserAsync(authenticationState.User);
+        try
+        {
+            return await StillBelongsAsync(scope.ServiceProvider.GetRequiredService<UserManager<ClinicUser>>(), authenticationState.User);
+        }
+        catch (Exception away) when (DatabaseAway.Is(away))
+        {
+            log.LogWarning(away, "Whether a person may still be there could not be looked up; this is tried again in a minute.");
+            return true; // While the record is away nothing can be read or changed, and a page closed now would lose what was typed.
+        }
+    }
+
+    private async Task<bool> StillBelongsAsync(UserManager<ClinicUser> users, ClaimsPrincipal person)
+    {
+        var user = await users.GetUserAsync(person);
         return user is { IsActive: true }
-            && authenticationState.User.FindFirstValue(options.Value.ClaimsIdentity.SecurityStampClaimType) == await users.GetSecurityStampAsync(user);
+            && person.FindFirstValue(options.Value.ClaimsIdentity.SecurityStampClaimType) == await users.GetSecurityStampAsync(user);
     }
 }
