@@ -14,7 +14,7 @@ public class EveryPageTests(BrowserFixture browser)
     [
         (ClinicRole.Nurse, ["/daily-weights", "/daily-weights?view=nonsense&sort=x", "/patients", "/patients/new", "/patients/1", "/patients/4711", "/no-such-page"]),
         (ClinicRole.Prescriber, ["/questions", "/patients/1"]),
-        (ClinicRole.Coordinator, ["/readings-in", "/flag-behaviour", "/people"]),
+        (ClinicRole.Coordinator, ["/readings-in", "/people"]),
         (ClinicRole.Administrator, ["/people", "/record-of-access"]),
     ];
 
