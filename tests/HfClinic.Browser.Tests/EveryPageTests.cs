@@ -13,7 +13,7 @@ public class EveryPageTests(BrowserFixture browser)
     private static readonly (ClinicRole Role, string[] Addresses)[] Pages =
     [
         (ClinicRole.Nurse, ["/daily-weights", "/daily-weights?view=nonsense&sort=x", "/patients", "/patients/new", "/patients/1", "/patients/4711", "/no-such-page"]),
-        (ClinicRole.Prescriber, ["/questions", "/patients/1"]),
+        (ClinicRole.Prescriber, ["/questions", "/patients/1", "/flag-behaviour"]),
         (ClinicRole.Coordinator, ["/readings-in", "/people"]),
         (ClinicRole.Administrator, ["/people", "/record-of-access"]),
     ];

@@ -28,6 +28,7 @@ public class AccessMatrixTests
         ["/patients/{Id:long}"] = ("/patients/1", Staff),
         ["/patients/{Id:long}/edit"] = ("/patients/1/edit", Staff),
         ["/questions"] = ("/questions", Staff),
+        ["/flag-behaviour"] = ("/flag-behaviour", [Prescriber, Coordinator]),
         ["/readings-in"] = ("/readings-in", ReadsFilesIn),
         ["/readings-in/{ImportId:long}"] = ("/readings-in/1", ReadsFilesIn),
         ["/readings-in/{importId:long}/report.csv"] = ("/readings-in/1/report.csv", ReadsFilesIn),
