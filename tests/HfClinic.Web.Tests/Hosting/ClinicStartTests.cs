@@ -22,7 +22,7 @@ public class ClinicStartTests
     public async Task A_real_clinic_is_refused_on_the_demos_record_and_the_demo_may_start_on_it_again(DatabaseEngine engine)
     {
         await using var database = await TestDatabases.CreateAsync(engine, DatabaseTemplate.Empty);
-        await PrepareAsync(database.ConnectionString, "demo", "--patients", "34");
+        await PrepareAsync(database.ConnectionString, "demo", "--patients", "40");
         Assert.Contains("holds the invented demo clinic", await RefusalAsync(database.ConnectionString));
         await PrepareAsync(database.ConnectionString, "demo");
         Assert.Equal(0, await VerifyAsync(database.ConnectionString));
@@ -32,7 +32,7 @@ public class ClinicStartTests
     public async Task A_demo_that_was_stopped_while_it_was_made_is_not_taken_for_a_whole_one(DatabaseEngine engine)
     {
         await using var database = await TestDatabases.CreateAsync(engine, DatabaseTemplate.Empty);
-        await PrepareAsync(database.ConnectionString, "demo", "--patients", "34");
+        await PrepareAsync(database.ConnectionString, "demo", "--patients", "40");
         await ExecuteAsync(database.ConnectionString, "DELETE FROM \"SweepRuns\"");
         Assert.Contains("demo --fresh", await RefusalAsync(database.ConnectionString, "demo"));
     }
